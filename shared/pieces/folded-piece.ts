@@ -20,6 +20,8 @@ export interface Cavity {
   readonly width: Dimension
   /** `null` for a flat pocket and along an open tube. */
   readonly depth: Dimension | null
+  /** The axis along which content may fall short without rattling: up out of a card's pocket. */
+  readonly open: 'length' | 'width' | null
 }
 
 /** A piece folded up, empty: sizes with their sources. */

@@ -1,41 +1,44 @@
-import { areaOf, perimeterOf } from '../../geometry/area.ts'
+import { areaOf, perimeterOf, signedAreaOf } from '../../geometry/area.ts'
 import { clipToConvex, isConvex } from '../../geometry/clip-convex.ts'
-import { coveredArea, intersectionOf } from '../../geometry/combine.ts'
 import type { Polygon } from '../../geometry/shapes.ts'
 import { samePoint } from '../../geometry/tolerance.ts'
 import type { LayerMap } from '../folded-piece.ts'
 
-/** The part several flaps share, as outlines: one where all are convex. */
-type Region = readonly Polygon[]
+/** The part of an outline that lies under a folded flap, as outlines. */
+export type Clip = (polygon: Polygon, flap: Polygon) => readonly Polygon[]
 
-const regionArea = (region: Region): number => (region.length === 1 ? areaOf(region[0] ?? []) : coveredArea(region))
-
-function narrow(region: Region, flap: Polygon, isFlapConvex: boolean): Region {
-  if (isFlapConvex && region.length === 1 && isConvex(region[0] ?? [])) {
-    const kept = clipToConvex(region[0] ?? [], flap)
-    return kept.length === 0 ? [] : [kept]
-  }
-  return region.flatMap((polygon) => intersectionOf(polygon, flap))
+/** Clipping for convex flaps, which every envelope of the model has: exact and quick. */
+const clipConvexFlap: Clip = (polygon, flap) => {
+  if (!isConvex(flap)) throw new RangeError('a flap that is not convex needs a clip of its own')
+  const kept = clipToConvex(polygon, flap)
+  return kept.length === 0 ? [] : [kept]
 }
+
+const regionArea = (region: readonly Polygon[]): number =>
+  Math.abs(region.reduce((total, polygon) => total + signedAreaOf(polygon), 0))
 
 /**
  * Share of the pocket under each number of layers: entry n is the share with exactly n layers, the face counted.
  * Areas that every group of flaps shares are found by clipping, and the parts under exactly k flaps follow by
  * inclusion and exclusion: E_k = Σ_{j≥k} (−1)^(j−k)·C(j,k)·S_j (derived).
  * @param pocket convex, counter-clockwise; @param foldedFlaps as they lie over it once folded
+ * @param clip for flaps that are not convex
  */
-export function layerShares(pocket: Polygon, foldedFlaps: readonly Polygon[]): readonly number[] {
+export function layerShares(
+  pocket: Polygon,
+  foldedFlaps: readonly Polygon[],
+  clip: Clip = clipConvexFlap,
+): readonly number[] {
   const count = foldedFlaps.length
   const sums = new Array<number>(count + 1).fill(0)
   const total = areaOf(pocket)
   sums[0] = total
-  const convex = foldedFlaps.map((flap) => isConvex(flap))
   const least = samePoint * samePoint
-  const visit = (region: Region, from: number, depth: number): void => {
+  const visit = (region: readonly Polygon[], from: number, depth: number): void => {
     for (let index = from; index < count; index += 1) {
       const flap = foldedFlaps[index]
       if (flap === undefined) continue
-      const shared = narrow(region, flap, convex[index] ?? false)
+      const shared = region.flatMap((polygon) => clip(polygon, flap))
       const area = regionArea(shared)
       if (area <= least) continue
       sums[depth + 1] = (sums[depth + 1] ?? 0) + area
@@ -61,8 +64,8 @@ export function layerShares(pocket: Polygon, foldedFlaps: readonly Polygon[]): r
  * Layers of paper over the pocket: fewest, mean (1 + flap areas inside the pocket ÷ its area, exact), most.
  * A part narrower than rounding does not count.
  */
-export function layerMap(pocket: Polygon, foldedFlaps: readonly Polygon[]): LayerMap {
-  const shares = layerShares(pocket, foldedFlaps)
+export function layerMap(pocket: Polygon, foldedFlaps: readonly Polygon[], clip: Clip = clipConvexFlap): LayerMap {
+  const shares = layerShares(pocket, foldedFlaps, clip)
   const area = areaOf(pocket)
   const least = area > 0 ? (samePoint * perimeterOf(pocket)) / area : 0
   const present = shares.flatMap((share, layers) => (share > least ? [layers] : []))
@@ -81,11 +84,10 @@ export function openBack(pocket: Polygon, foldedFlaps: readonly Polygon[]): numb
 
 /** Area by which a folded flap lies outside the pocket, in square millimetres. */
 export function protrudingArea(pocket: Polygon, foldedFlap: Polygon): number {
-  const inside = regionArea(narrow([foldedFlap], pocket, isConvex(pocket)))
+  const inside = regionArea(clipConvexFlap(foldedFlap, pocket))
   const outside = areaOf(foldedFlap) - inside
   return outside <= samePoint * perimeterOf(foldedFlap) ? 0 : outside
 }
 
 /** Area glued between two folded flaps, in square millimetres. */
-export const gluedArea = (first: Polygon, second: Polygon): number =>
-  regionArea(narrow([first], second, isConvex(second)))
+export const gluedArea = (first: Polygon, second: Polygon): number => regionArea(clipConvexFlap(first, second))
