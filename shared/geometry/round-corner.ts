@@ -1,6 +1,7 @@
 import type { Millimetres } from '../units/units.ts'
 import type { Point, Polygon } from './shapes.ts'
 import { chordError } from './tolerance.ts'
+import { withoutRepeats } from './without-repeats.ts'
 
 /** Points along an arc, ends included, near enough that no chord lies more than the chord error inside it. Angles in radians. */
 export function arcPoints(centre: Point, radius: Millimetres, fromAngle: number, toAngle: number): readonly Point[] {
@@ -39,10 +40,11 @@ export function roundCorners(
   isRounded: (corner: Point, index: number) => boolean = () => true,
 ): Polygon {
   if (radius <= 0) return polygon
-  return polygon.flatMap((corner, index) => {
+  const rounded = polygon.flatMap((corner, index) => {
     const before = polygon[(index + polygon.length - 1) % polygon.length]
     const after = polygon[(index + 1) % polygon.length]
     if (before === undefined || after === undefined || !isRounded(corner, index)) return [corner]
     return roundOne(before, corner, after, radius)
   })
+  return withoutRepeats(rounded)
 }

@@ -2,6 +2,7 @@ import { arcPoints } from '../../geometry/round-corner.ts'
 import { point } from '../../geometry/rectangle.ts'
 import type { Point, Polygon, Segment } from '../../geometry/shapes.ts'
 import { samePoint } from '../../geometry/tolerance.ts'
+import { withoutRepeats } from '../../geometry/without-repeats.ts'
 import type { Millimetres } from '../../units/units.ts'
 import type { TabsGiven, WallsGiven } from './box-given.ts'
 
@@ -121,8 +122,5 @@ export function trayOutline(shape: TrayShape): Polygon {
     const wall = distance(corner.floor, corner.after)
     return [...path, ...notchIn(corner.after, next.before, wall)]
   })
-  return points.filter((here, index) => {
-    const before = points[(index + points.length - 1) % points.length]
-    return before === undefined || distance(here, before) > samePoint
-  })
+  return withoutRepeats(points)
 }

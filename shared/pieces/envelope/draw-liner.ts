@@ -4,6 +4,7 @@ import { edgesOf } from '../../geometry/contains-point.ts'
 import { point } from '../../geometry/rectangle.ts'
 import type { Point, Polygon } from '../../geometry/shapes.ts'
 import { samePoint } from '../../geometry/tolerance.ts'
+import { withoutRepeats } from '../../geometry/without-repeats.ts'
 import type { Millimetres } from '../../units/units.ts'
 import { area, grainAlong, makeBlank, measure, score, segment, type DrawContext } from '../blank-parts.ts'
 import type { Blank } from '../blank.ts'
@@ -47,10 +48,7 @@ export function drawLiner(
   const start = above.findIndex((corner) => corner.x === Math.max(...above.map((other) => other.x)))
   const ordered = [...above.slice(start), ...above.slice(0, start)]
   const shoulders = [point(x2, top), point(ends.right, top), ...ordered, point(ends.left, top), point(x1, top)]
-  const outline = [point(x1, floor), point(x2, floor), ...shoulders].filter((corner, index, all) => {
-    const before = all[(index + all.length - 1) % all.length]
-    return before === undefined || Math.hypot(corner.x - before.x, corner.y - before.y) > samePoint
-  })
+  const outline = withoutRepeats([point(x1, floor), point(x2, floor), ...shoulders])
   const peak = boundsOf(outline).top
   const middle = (x1 + x2) / 2
   return [

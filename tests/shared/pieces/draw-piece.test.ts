@@ -1,0 +1,298 @@
+import fc from 'fast-check'
+import { describe, expect, it } from 'vitest'
+import { areaOf, signedAreaOf } from '../../../shared/geometry/area.ts'
+import { boundsOf } from '../../../shared/geometry/bounds.ts'
+import { containsPoint } from '../../../shared/geometry/contains-point.ts'
+import { isSimple } from '../../../shared/geometry/crossings.ts'
+import { checkBlank } from '../../../shared/pieces/check-blank.ts'
+import { drawPiece } from '../../../shared/pieces/draw-registry.ts'
+import type { PieceGiven } from '../../../shared/pieces/given.ts'
+import {
+  aBag,
+  aBand,
+  aBaronial,
+  aBaronialByCorners,
+  aBox,
+  aCard,
+  aCustom,
+  anInsert,
+  aSleeve,
+  aSquareFlap,
+  foldGiven,
+} from '../../support/given-pieces.ts'
+
+const between = (min: number, max: number) => fc.double({ min, max, noNaN: true })
+const size = fc.record({ length: between(80, 250), width: between(60, 200) })
+
+const validBox = fc
+  .record({
+    scored: size,
+    ends: fc.tuple(between(10, 28), between(10, 28)),
+    sides: fc.tuple(between(10, 28), between(10, 28)),
+    at: fc.constantFrom('ends' as const, 'sides' as const),
+    trim: between(0, 3),
+    taper: between(0, 12),
+    thumbNotch: fc.boolean(),
+    walls: fc.constantFrom('single' as const, 'doubled' as const),
+    covered: fc.constantFrom(null, 'wrap'),
+    kind: fc.constantFrom('box' as const, 'lid' as const),
+  })
+  .map(({ scored, ends, sides, at, trim, taper, ...rest }): PieceGiven => {
+    const longer = Math.max(scored.length, scored.width)
+    const shorter = Math.min(scored.length, scored.width)
+    return aBox({
+      ...rest,
+      by: {
+        given: 'blank',
+        blank: { length: longer + ends[0] + ends[1], width: shorter + sides[0] + sides[1] },
+        wall: { length: ends, width: sides },
+      },
+      tabs: { at, glued: 'inside', trim, taper },
+    })
+  })
+
+const layer = { stock: 'text', size: { length: 60, width: 40 }, at: { x: 0, y: 0 } }
+
+const validCard = fc
+  .record({
+    folded: size,
+    fold: fc.constantFrom('long-edge' as const, 'short-edge' as const, 'none' as const),
+    style: fc.constantFrom('single' as const, 'roll' as const, 'accordion' as const, 'gate' as const),
+    panels: fc.integer({ min: 3, max: 6 }),
+    corner: fc.constantFrom(0, 3, 6),
+    pocket: fc.constantFrom(null, { depth: 40, side: 8 }),
+    banner: fc.constantFrom(null, { depth: 8, point: 'in' as const }, { depth: 8, point: 'out' as const }),
+    side: fc.constantFrom('front' as const, 'inside' as const),
+    insert: fc.constantFrom(
+      null,
+      { stock: 'text', loose: true, folded: true },
+      { stock: 'text', loose: false, folded: false },
+    ),
+  })
+  .map(({ banner, side, panels, ...rest }): PieceGiven =>
+    aCard({
+      ...rest,
+      panels: rest.fold === 'none' ? 1 : rest.style === 'single' ? 2 : panels,
+      layers: [{ ...layer, side, banner }],
+    }),
+  )
+
+const validBaronial = fc
+  .record({
+    pocket: size,
+    bottom: between(6, 20),
+    top: between(6, 20),
+    corner: fc.constantFrom(0, 3),
+    liner: fc.constantFrom(null, 'text'),
+  })
+  .map(({ pocket, bottom, top, ...rest }): PieceGiven => aBaronial({ pocket, seam: { bottom, top }, ...rest }))
+
+const validSquareFlap = fc
+  .record({
+    pocket: size,
+    sideFlap: between(8, 25),
+    corner: fc.constantFrom(0, 4),
+    liner: fc.constantFrom(null, 'text'),
+  })
+  .map((given): PieceGiven => aSquareFlap(given))
+
+const validSleeve = fc
+  .record({ panels: fc.tuple(between(40, 120), between(10, 60)), overlap: between(8, 25), width: between(20, 150) })
+  .map(({ panels: [wide, high], overlap, width }): PieceGiven => {
+    const scores = [wide, wide + high, 2 * wide + high, 2 * wide + 2 * high]
+    return aSleeve({ overlap, blank: { length: (scores[3] ?? 0) + overlap, width, scores } })
+  })
+
+const validBag = fc
+  .record({ inside: fc.record({ width: between(50, 200), depth: between(20, 90), height: between(80, 250) }) })
+  .map((given): PieceGiven => aBag(given))
+
+const validPiece: fc.Arbitrary<PieceGiven> = fc.oneof(
+  validBox,
+  validCard,
+  validBaronial,
+  validSquareFlap,
+  validSleeve,
+  validBag,
+  size.map((both): PieceGiven => anInsert({ size: both, corner: 3 })),
+  size.map((both): PieceGiven => aBand({ width: both.width / 3, blank: { length: both.length * 2, scores: [] } })),
+)
+
+describe('every sheet of every valid piece', () => {
+  it('is closed, does not cross itself and lies with its lower left at the origin', () => {
+    fc.assert(
+      fc.property(validPiece, (given) => {
+        const blanks = drawPiece('piece', foldGiven(given), () => 'long')
+        expect(blanks.length).toBeGreaterThan(0)
+        for (const blank of blanks) {
+          expect(isSimple(blank.outline), blank.name).toBe(true)
+          expect(signedAreaOf(blank.outline)).toBeGreaterThan(0)
+          const { left, bottom } = boundsOf(blank.outline)
+          expect(left).toBeCloseTo(0, 9)
+          expect(bottom).toBeCloseTo(0, 9)
+        }
+      }),
+      { numRuns: 300 },
+    )
+  })
+
+  it('has its scores, areas and measures on it', () => {
+    fc.assert(
+      fc.property(validPiece, (given) => {
+        for (const blank of drawPiece('piece', foldGiven(given))) {
+          for (const { from, to, name } of blank.scores) {
+            expect(Math.hypot(to.x - from.x, to.y - from.y), name).toBeGreaterThan(0.1)
+            expect(containsPoint(blank.outline, from, 1e-5), name).toBe(true)
+            expect(containsPoint(blank.outline, to, 1e-5), name).toBe(true)
+          }
+          const bounds = boundsOf(blank.outline)
+          for (const { polygon, name } of blank.areas) {
+            const part = boundsOf(polygon)
+            expect(part.left, name).toBeGreaterThanOrEqual(bounds.left - 1e-6)
+            expect(part.right, name).toBeLessThanOrEqual(bounds.right + 1e-6)
+          }
+          for (const { from, to, length } of blank.measures) {
+            expect(length).toBeCloseTo(Math.hypot(to.x - from.x, to.y - from.y), 9)
+          }
+        }
+      }),
+      { numRuns: 300 },
+    )
+  })
+
+  it('keeps every geometric fact of its kind but the width of shown flaps', () => {
+    fc.assert(
+      fc.property(fc.oneof(validBox, validSleeve, validBag, validSquareFlap), (given) => {
+        const piece = foldGiven(given)
+        const broken = checkBlank(piece, drawPiece('piece', piece)).filter((fact) => !fact.holds)
+        const isAllowed = broken.every((fact) => ['tab-too-long', 'tabs-collide', 'back-open'].includes(fact.fact))
+        expect(isAllowed, JSON.stringify(broken)).toBe(true)
+      }),
+    )
+  })
+})
+
+describe('a box', () => {
+  it('has the area of its sheet less what is cut out at the corners', () => {
+    const piece = foldGiven(aBox())
+    const [blank] = drawPiece('base', piece)
+    // Tabs 20 long on walls 20 deep: 1 mm trimmed and two wedges of 20·tan 5° each.
+    const cutOut = 4 * (1 * 20 + 20 * 20 * Math.tan((5 * Math.PI) / 180))
+    expect(areaOf(blank?.outline ?? [])).toBeCloseTo(200 * 158 - cutOut, 6)
+  })
+
+  it('keeps all of its sheet where tabs have neither trim nor taper, and names four slits', () => {
+    const piece = foldGiven(aBox({ tabs: { at: 'sides', glued: 'inside', trim: 0, taper: 0 } }))
+    const [blank] = drawPiece('base', piece)
+    expect(areaOf(blank?.outline ?? [])).toBeCloseTo(200 * 158, 9)
+    expect(blank?.cuts).toHaveLength(4)
+    for (const cut of blank?.cuts ?? [])
+      expect(Math.hypot(cut.to.x - cut.from.x, cut.to.y - cut.from.y)).toBeCloseTo(20, 9)
+  })
+
+  it('loses two half discs to its thumb notches', () => {
+    const plain = drawPiece('base', foldGiven(aBox()))[0]
+    const notched = drawPiece('base', foldGiven(aBox({ thumbNotch: true })))[0]
+    const lost = areaOf(plain?.outline ?? []) - areaOf(notched?.outline ?? [])
+    expect(lost).toBeGreaterThan(0.99 * Math.PI * 100)
+    expect(lost).toBeLessThanOrEqual(Math.PI * 100)
+  })
+
+  it('has its tabs on the walls its author asked for', () => {
+    const ends = drawPiece('base', foldGiven(aBox()))[0]
+    const tabScores = ends?.scores.filter((line) => line.name.startsWith('tab')) ?? []
+    expect(tabScores).toHaveLength(4)
+    for (const line of tabScores) expect(line.from.y).toBeCloseTo(line.to.y, 9)
+    const sides = drawPiece('base', foldGiven(aBox({ tabs: { at: 'sides', glued: 'inside', trim: 1, taper: 5 } })))[0]
+    for (const line of sides?.scores.filter((one) => one.name.startsWith('tab')) ?? [])
+      expect(line.from.x).toBeCloseTo(line.to.x, 9)
+  })
+
+  it('comes with four strips where its walls are doubled and a sheet where it is covered', () => {
+    const names = drawPiece('base', foldGiven(aBox({ walls: 'doubled', covered: 'wrap' }))).map((blank) => blank.name)
+    expect(names).toEqual([
+      'base',
+      'base/side wall lining 1',
+      'base/side wall lining 2',
+      'base/end wall lining 1',
+      'base/end wall lining 2',
+      'base/cover',
+    ])
+  })
+})
+
+describe('what is broken shows', () => {
+  const broken = (given: PieceGiven) => {
+    const piece = foldGiven(given, 0.35)
+    return checkBlank(piece, drawPiece('piece', piece)).filter((fact) => !fact.holds)
+  }
+  const boxOf = (scoredLength: number, scoredWidth: number, wall: number) =>
+    aBox({
+      by: {
+        given: 'blank',
+        blank: { length: scoredLength + 2 * wall, width: scoredWidth + 2 * wall },
+        wall: { length: [wall, wall], width: [wall, wall] },
+      },
+    })
+
+  it('names tabs of 34 that overlap by 8.35 on a wall 59.65 long inside', () => {
+    const collision = broken(boxOf(60, 50, 34)).filter((fact) => fact.fact === 'tabs-collide')
+    expect(collision).toHaveLength(2)
+    for (const fact of collision) expect(fact.measured - fact.limit).toBeCloseTo(8.35, 6)
+    expect(broken(boxOf(150, 112, 34)).filter((fact) => fact.fact === 'tabs-collide')).toEqual([])
+  })
+
+  it('names walls deeper than the sheet allows', () => {
+    expect(broken(boxOf(80, -5, 40)).map((fact) => fact.fact)).toContain('wall-too-deep')
+  })
+
+  it('names a tab taller than the wall it is glued to', () => {
+    const found = broken(
+      aBox({ by: { given: 'blank', blank: { length: 210, width: 158 }, wall: { length: [25, 25], width: [20, 20] } } }),
+    )
+    expect(found).toEqual([expect.objectContaining({ fact: 'tab-too-long', measured: 25, limit: 20 })])
+  })
+
+  it('names flaps that poke out of a long narrow pocket', () => {
+    const found = broken(
+      aBaronial({ pocket: { length: 200, width: 60 }, seam: { bottom: 5 * Math.SQRT2, top: 5 * Math.SQRT2 } }),
+    )
+    const shows = found.filter((fact) => fact.fact === 'flap-shows')
+    expect(shows.map((fact) => fact.part)).toEqual(['bottom flap', 'seal flap'])
+    expect(shows[0]?.measured).toBeCloseTo(45, 6)
+  })
+
+  it('names a narrow seam, and folds that leave the back open', () => {
+    expect(broken(aBaronial({ seam: { bottom: 5, top: 12 } })).map((fact) => fact.fact)).toEqual(['seam-narrow'])
+    const open = broken(aBaronialByCorners({ square: 150, corners: { left: 60, right: 60, bottom: 60, flap: 60 } }))
+    expect(open.map((fact) => fact.fact)).toEqual(expect.arrayContaining(['flap-short', 'back-open', 'seam-narrow']))
+  })
+
+  it('names a folded-in panel that is not shorter than the one it lies in', () => {
+    const found = broken(aCard({ style: 'roll', panels: 3, panelWidths: [100, 100, 99.5] }))
+    expect(found).toEqual([expect.objectContaining({ fact: 'inner-panel', part: 'panel 3' })])
+    expect(broken(aCard({ style: 'roll', panels: 3, panelWidths: [100, 100, 99] }))).toEqual([])
+  })
+
+  it('names an outline that crosses itself and a score that leaves the sheet', () => {
+    const tie = [
+      { x: 0, y: 0 },
+      { x: 100, y: 100 },
+      { x: 100, y: 0 },
+      { x: 0, y: 100 },
+    ]
+    expect(broken(aCustom({ outline: tie, scores: [] })).map((fact) => fact.fact)).toEqual(['outline'])
+    const stray = { from: { x: 0, y: 40 }, to: { x: 90, y: 40 }, fold: 'valley', angle: 90 } as const
+    expect(broken(aCustom({ scores: [stray] })).map((fact) => fact.fact)).toEqual(['score-outside'])
+  })
+})
+
+describe('grain', () => {
+  it('runs along the folded length where the stock is long grain, on every sheet of the piece', () => {
+    const grainOf = () => 'long' as const
+    expect(drawPiece('card', foldGiven(aCard()), grainOf)[0]?.grain).toBe('y')
+    expect(drawPiece('card', foldGiven(aCard({ fold: 'short-edge' })), grainOf)[0]?.grain).toBe('x')
+    expect(drawPiece('base', foldGiven(aBox()), grainOf)[0]?.grain).toBe('x')
+    expect(drawPiece('base', foldGiven(aBox()))[0]?.grain).toBeNull()
+  })
+})
