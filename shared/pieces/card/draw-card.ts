@@ -1,6 +1,7 @@
 import { point, rectangle } from '../../geometry/rectangle.ts'
 import { roundCorners } from '../../geometry/round-corner.ts'
 import type { Point, Polygon } from '../../geometry/shapes.ts'
+import { withoutRepeats } from '../../geometry/without-repeats.ts'
 import type { Millimetres } from '../../units/units.ts'
 import { area, grainAlong, makeBlank, measure, score, segment, type DrawContext } from '../blank-parts.ts'
 import type { Blank, BlankArea, Score } from '../blank.ts'
@@ -86,7 +87,7 @@ export function drawLayer(
   })
 }
 
-/** Where inside layers are glued: on the last panel, placed from its middle. */
+/** Where inside layers are glued: on the panel that holds, placed from its middle. */
 function insideLayers(
   given: CardGiven,
   panel: Panel,
@@ -133,7 +134,7 @@ function drawInsertSheet(
   ]
 }
 
-/** A card: its sheet inside up, panels side by side along x, a pocket below the last; then its layers and its insert. */
+/** A card: its sheet inside up, panels side by side along x, a pocket below the panel that holds; then its layers and its insert. */
 export function drawCard(piece: FoldedPiece, given: CardGiven, context: DrawContext): readonly Blank[] {
   if (piece.form.kind !== 'card') return []
   const size = foldedSize(given)
@@ -141,24 +142,20 @@ export function drawCard(piece: FoldedPiece, given: CardGiven, context: DrawCont
   const high = lengthRuns === 'x' ? size.width : size.length
   const panels = panelsInOrder(given, size.across === null ? [size.width] : piece.form.panels)
   const last = panels[panels.length - 1]
-  if (last === undefined) return []
+  // A gate's leaves are half a panel wide: what is glued or held inside lies on its back.
+  const holder = piece.form.panels.length === 3 && given.style === 'gate' ? panels[1] : last
+  if (last === undefined || holder === undefined) return []
   const total = last.to
   const bottom = given.pocket?.depth ?? 0
-  const body = rectangle(0, bottom, total, bottom + high)
-  const pocket = given.pocket === null ? null : rectangle(last.from, 0, last.to, bottom)
-  const outline: Polygon =
-    pocket === null
-      ? body
-      : last.from === 0
-        ? rectangle(0, 0, total, bottom + high)
-        : [
-            point(0, bottom),
-            point(last.from, bottom),
-            point(last.from, 0),
-            point(total, 0),
-            point(total, bottom + high),
-            point(0, bottom + high),
-          ]
+  const pocket = given.pocket === null ? null : rectangle(holder.from, 0, holder.to, bottom)
+  const below = pocket === null ? [] : [point(holder.from, bottom), ...pocket.slice(0, 2), point(holder.to, bottom)]
+  const outline = withoutRepeats([
+    point(0, bottom),
+    ...below,
+    point(total, bottom),
+    point(total, bottom + high),
+    point(0, bottom + high),
+  ])
   const isOuter = (corner: Point): boolean => corner.x === 0 || corner.x === total
   const side = given.pocket?.side ?? 0
   return [
@@ -168,19 +165,17 @@ export function drawCard(piece: FoldedPiece, given: CardGiven, context: DrawCont
       outline: roundCorners(outline, given.corner, isOuter),
       scores: [
         ...foldScores(given, panels, high, bottom),
-        ...(pocket === null ? [] : [score('pocket', segment(last.from, bottom, last.to, bottom), 180)]),
+        ...(pocket === null ? [] : [score('pocket', segment(holder.from, bottom, holder.to, bottom), 180)]),
       ],
       areas: [
         ...panels.map((panel) => area('panel', panel.name, rectangle(panel.from, bottom, panel.to, bottom + high))),
-        ...insideLayers(given, last, high, bottom, lengthRuns),
+        ...insideLayers(given, holder, high, bottom, lengthRuns),
+        ...(pocket === null ? [] : [area('flap', 'pocket', pocket)]),
         ...(pocket === null || side === 0
-          ? pocket === null
-            ? []
-            : [area('flap', 'pocket', pocket)]
+          ? []
           : [
-              area('flap', 'pocket', pocket),
-              area('glue', 'pocket side', rectangle(last.from, 0, last.from + side, bottom)),
-              area('glue', 'pocket side', rectangle(last.to - side, 0, last.to, bottom)),
+              area('glue', 'pocket side', rectangle(holder.from, 0, holder.from + side, bottom)),
+              area('glue', 'pocket side', rectangle(holder.to - side, 0, holder.to, bottom)),
             ]),
       ],
       measures: [
@@ -199,7 +194,7 @@ export function drawCard(piece: FoldedPiece, given: CardGiven, context: DrawCont
               point(panel.to, bottom),
             ),
           ),
-        ...(pocket === null ? [] : [measure('pocket', point(last.to, 0), point(last.to, bottom))]),
+        ...(pocket === null ? [] : [measure('pocket', point(holder.to, 0), point(holder.to, bottom))]),
       ],
       grain: grainAlong(context, given.stock, lengthRuns),
     }),
