@@ -32,7 +32,7 @@ function outerSize(report: Report, fit: FitReport, axis: AxisReport['axis']): Di
   // A bag's face and gusset are its length and width; what is put in knows them as width and depth.
   const inBag = outer.kind === 'bag' && fit.relation === 'in'
   const name = inBag ? (axis === 'width' ? 'length' : 'width') : axis
-  const size = name === 'headspace' ? undefined : outer.inside?.[name === 'overlap' ? 'length' : name]
+  const size = name === 'headspace' ? undefined : outer.inside?.[name]
   return size === undefined ? null : dimensionOf(size)
 }
 
