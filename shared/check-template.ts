@@ -45,7 +45,9 @@ function usedInputs(set: TemplateSet): Report['inputs'] {
   const makers = new Set([tokens.workmanship])
   for (const piece of set.pieces.values()) if (piece.workmanship !== null) makers.add(piece.workmanship)
   for (const fit of set.fits) if (fit.workmanship !== null) makers.add(fit.workmanship)
-  const clearances = set.fits.flatMap((fit) => (fit.clearance?.name == null ? [] : [[fit.clearance.name, fit.clearance] as const]))
+  const clearances = set.fits.flatMap((fit) =>
+    fit.clearance?.name == null ? [] : [[fit.clearance.name, fit.clearance] as const],
+  )
   return {
     stocks: Object.fromEntries(
       [...stockNames].flatMap((name) => {
@@ -68,19 +70,58 @@ function usedInputs(set: TemplateSet): Report['inputs'] {
 
 function digestOfSet(set: TemplateSet, tokens: Tokens, inputs: Report['inputs'], options: CheckOptions): string {
   return digestOf({
-    set: { name: set.name, title: set.title, family: set.family, sheet: set.sheet, mail: set.mail, pieces: set.pieces, fits: set.fits, waivers: set.waivers, steps: set.steps },
+    set: {
+      name: set.name,
+      title: set.title,
+      family: set.family,
+      sheet: set.sheet,
+      mail: set.mail,
+      pieces: set.pieces,
+      fits: set.fits,
+      waivers: set.waivers,
+      steps: set.steps,
+    },
     inputs,
-    rules: { units: tokens.units, ruler: tokens.ruler, target: tokens.target, floor: tokens.floor, workmanship: tokens.workmanship, checks: tokens.checks, humidity: tokens.humidity },
-    options: { asOf: options.asOf, workmanship: options.workmanship ?? null, paper: options.paper ?? null, scale: options.scale ?? 1 },
+    rules: {
+      units: tokens.units,
+      ruler: tokens.ruler,
+      target: tokens.target,
+      floor: tokens.floor,
+      workmanship: tokens.workmanship,
+      checks: tokens.checks,
+      humidity: tokens.humidity,
+    },
+    options: {
+      asOf: options.asOf,
+      workmanship: options.workmanship ?? null,
+      paper: options.paper ?? null,
+      scale: options.scale ?? 1,
+    },
     engine: engineVersion,
     edition: rulesEdition,
   })
 }
 
-const emptySummary: Summary = { pass: 0, info: 0, warn: 0, fail: 0, waived: 0, unchecked: 0, crashed: 0, works: 0, verdict: 'invalid' }
+const emptySummary: Summary = {
+  pass: 0,
+  info: 0,
+  warn: 0,
+  fail: 0,
+  waived: 0,
+  unchecked: 0,
+  crashed: 0,
+  works: 0,
+  verdict: 'invalid',
+}
 
 /** A report of a set that could not be understood: its problems and nothing else. */
-function invalidReport(reading: SetReading, text: string, workspace: Workspace, options: CheckOptions, problems: readonly Problem[]): Report {
+function invalidReport(
+  reading: SetReading,
+  text: string,
+  workspace: Workspace,
+  options: CheckOptions,
+  problems: readonly Problem[],
+): Report {
   const { set } = reading
   const tokens = set?.tokens ?? workspace.tokens
   const name = options.file.replace(/^.*\//, '').replace(/\.ya?ml$/, '')
@@ -170,7 +211,12 @@ function openProblems(reading: SetReading): readonly Problem[] {
  */
 export function checkTemplate(text: string, workspace: Workspace, options: CheckOptions): Report {
   const reading = readSet(text, options.file, workspace)
-  const problems = [...workspace.problems, ...reading.problems, ...openProblems(reading), ...optionProblems(reading, options)]
+  const problems = [
+    ...workspace.problems,
+    ...reading.problems,
+    ...openProblems(reading),
+    ...optionProblems(reading, options),
+  ]
   if (problems.length > 0 || reading.set === null) return invalidReport(reading, text, workspace, options, problems)
   return checkSet(reading.set, options)
 }

@@ -102,7 +102,14 @@ function intoTray(model: SetModel, fit: Fit, box: FoldedPiece, load: Load): FitC
   const depth =
     cavity.depth === null || model.hasLid(fit.to)
       ? []
-      : [axisOf(fit, 'tray', { axis: 'depth', outer: cavity.depth, inner: load.height, contentSize: load.height.nominal })]
+      : [
+          axisOf(fit, 'tray', {
+            axis: 'depth',
+            outer: cavity.depth,
+            inner: load.height,
+            contentSize: load.height.nominal,
+          }),
+        ]
   const headroom = cavity.depth === null ? null : cavity.depth.nominal - load.height.nominal
   const isDivider = load.stands && fit.stands === null
   if (isDivider) {
@@ -118,7 +125,10 @@ function intoTray(model: SetModel, fit: Fit, box: FoldedPiece, load: Load): FitC
         const axis = nearest[isTurned ? 1 : 0] ?? 'width'
         return {
           isTurned,
-          axes: [axisOf(fit, 'divider', { axis, outer: cavity[axis], inner: load.length, contentSize: load.length.nominal }), ...depth],
+          axes: [
+            axisOf(fit, 'divider', { axis, outer: cavity[axis], inner: load.length, contentSize: load.length.nominal }),
+            ...depth,
+          ],
         }
       }),
     }
@@ -156,8 +166,18 @@ function intoSection(fit: Fit, outer: FoldedPiece, load: Load, fitCase: 'bag' | 
     orientations: tries(fit, true).map((isTurned) => ({
       isTurned,
       axes: [
-        axisOf(fit, fitCase, { axis: 'width', outer: face, inner: isTurned ? through : along, contentSize: (isTurned ? through : along).nominal }),
-        axisOf(fit, fitCase, { axis: 'depth', outer: gusset, inner: isTurned ? along : through, contentSize: (isTurned ? along : through).nominal }),
+        axisOf(fit, fitCase, {
+          axis: 'width',
+          outer: face,
+          inner: isTurned ? through : along,
+          contentSize: (isTurned ? through : along).nominal,
+        }),
+        axisOf(fit, fitCase, {
+          axis: 'depth',
+          outer: gusset,
+          inner: isTurned ? along : through,
+          contentSize: (isTurned ? along : through).nominal,
+        }),
       ],
     })),
   }
@@ -177,7 +197,12 @@ function sleeveAround(model: SetModel, fit: Fit, sleeve: FoldedPiece, inner: str
         isTurned: false,
         axes: [
           axisOf(fit, 'sleeve', { axis, outer: cavity[axis], inner: around[axis], contentSize: around[axis].nominal }),
-          axisOf(fit, 'sleeve', { axis: 'depth', outer: cavity.depth, inner: around.height, contentSize: around.height.nominal }),
+          axisOf(fit, 'sleeve', {
+            axis: 'depth',
+            outer: cavity.depth,
+            inner: around.height,
+            contentSize: around.height.nominal,
+          }),
         ],
       },
     ],
@@ -200,7 +225,15 @@ function wrapAround(model: SetModel, fit: Fit, band: FoldedPiece): FitClearances
     orientations: [
       {
         isTurned: false,
-        axes: [axisOf(fit, fitCase, { axis: 'overlap', outer: band.form.stripLength, inner: girth, contentSize: nominal, closesFrom: 0 })],
+        axes: [
+          axisOf(fit, fitCase, {
+            axis: 'overlap',
+            outer: band.form.stripLength,
+            inner: girth,
+            contentSize: nominal,
+            closesFrom: 0,
+          }),
+        ],
       },
     ],
   }
@@ -214,7 +247,13 @@ function lidOver(model: SetModel, fit: Fit, lid: FoldedPiece): FitClearances {
   const isTurned = fit.turn === 'quarter'
   const sides = (['length', 'width'] as const).map((axis) => {
     const inner = base.outside[(axis === 'length') === isTurned ? 'width' : 'length']
-    return axisOf(fit, 'lid', { axis, outer: cavity[axis], inner, contentSize: inner.nominal, give: modelDefaults.lidGive.value })
+    return axisOf(fit, 'lid', {
+      axis,
+      outer: cavity[axis],
+      inner,
+      contentSize: inner.nominal,
+      give: modelDefaults.lidGive.value,
+    })
   })
   const headspace =
     seat === null || seat.content === null
@@ -235,7 +274,9 @@ export function clearancesOf(model: SetModel, fit: Fit): FitClearances {
   const outerOrPut = model.folded(fit.put[0]?.piece ?? fit.to)
   if (fit.relation === 'over') return lidOver(model, fit, outerOrPut)
   if (fit.relation === 'around') {
-    return outerOrPut.form.kind === 'band' ? wrapAround(model, fit, outerOrPut) : sleeveAround(model, fit, outerOrPut, fit.to)
+    return outerOrPut.form.kind === 'band'
+      ? wrapAround(model, fit, outerOrPut)
+      : sleeveAround(model, fit, outerOrPut, fit.to)
   }
   const outer = model.folded(fit.to)
   const load = model.load(fit)
@@ -251,4 +292,3 @@ export function clearancesOf(model: SetModel, fit: Fit): FitClearances {
       return intoTray(model, fit, outer, load)
   }
 }
-

@@ -3,7 +3,17 @@ import type { Fit } from '../template/template-model.ts'
 import { jointProbability } from '../uncertainty/joint.ts'
 import type { Dimension } from '../uncertainty/dimension.ts'
 import { clearancesOf, type FitClearances, type Orientation } from './clearances.ts'
-import { bowGive, bowHeight, clears, closesAt, judgeAxis, worse, type FitVerdict, type JudgedAxis, type Shares } from './judge-axis.ts'
+import {
+  bowGive,
+  bowHeight,
+  clears,
+  closesAt,
+  judgeAxis,
+  worse,
+  type FitVerdict,
+  type JudgedAxis,
+  type Shares,
+} from './judge-axis.ts'
 import type { Seat, SetModel } from './set-model.ts'
 
 /** One condition of a fit going together by hand. */
@@ -23,7 +33,12 @@ export interface JudgedFit {
   readonly closes: number
   readonly conditions: readonly CloseCondition[]
   readonly dependsOnCare: boolean
-  readonly give: { readonly axis: JudgedAxis; readonly name: 'snug' | 'push-on'; readonly goesTo: number; readonly bow: number | null } | null
+  readonly give: {
+    readonly axis: JudgedAxis
+    readonly name: 'snug' | 'push-on'
+    readonly goesTo: number
+    readonly bow: number | null
+  } | null
   readonly seat: Seat | null
 }
 
@@ -39,7 +54,12 @@ function givesOf(clearances: FitClearances, orientation: Orientation, shares: Sh
   })
 }
 
-function judgeOrientation(clearances: FitClearances, orientation: Orientation, shares: Shares, care: number): readonly JudgedAxis[] {
+function judgeOrientation(
+  clearances: FitClearances,
+  orientation: Orientation,
+  shares: Shares,
+  care: number,
+): readonly JudgedAxis[] {
   const gives = givesOf(clearances, orientation, shares, care)
   return orientation.axes.map((axis, index) => judgeAxis(axis, gives[index] ?? 0, shares, care))
 }
@@ -60,7 +80,9 @@ function chooseOrientation(clearances: FitClearances, shares: Shares): Chosen {
   const first = judged[0]
   if (first === undefined) throw new RangeError('a fit has no orientation')
   // Differences below what the distribution is computed to are ties.
-  return judged.slice(1).reduce((best, next) => (worstBinding(next.axes) < worstBinding(best.axes) - 1e-4 ? next : best), first)
+  return judged
+    .slice(1)
+    .reduce((best, next) => (worstBinding(next.axes) < worstBinding(best.axes) - 1e-4 ? next : best), first)
 }
 
 const verdictOf = (axes: readonly JudgedAxis[]): FitVerdict => axes.map((axis) => axis.verdict).reduce(worse, 'pass')
@@ -108,4 +130,3 @@ export function judgeFit(model: SetModel, fit: Fit): JudgedFit {
     seat: fit.relation === 'over' ? model.seat(fit.to) : null,
   }
 }
-

@@ -45,7 +45,8 @@ export function countPieces(set: TemplateSet): ReadonlyMap<string, number> {
   const raise = (piece: string, count: number): void => {
     counts.set(piece, Math.max(counts.get(piece) ?? 1, count))
   }
-  for (const [name, piece] of set.pieces) raise(name, piece.kind === 'insert' || piece.kind === 'divider' ? piece.count : 1)
+  for (const [name, piece] of set.pieces)
+    raise(name, piece.kind === 'insert' || piece.kind === 'divider' ? piece.count : 1)
   for (const fit of set.fits) {
     for (const entry of fit.put) raise(entry.piece, entry.count * fit.count)
     if (fit.holding !== null) raise(fit.holding, fit.put.reduce((sum, entry) => sum + entry.count, 0) * fit.count)
@@ -53,7 +54,8 @@ export function countPieces(set: TemplateSet): ReadonlyMap<string, number> {
   // Whatever is put into a thing that is itself made several times is needed in each of them.
   for (const fit of set.fits) {
     const outer = counts.get(fit.to) ?? 1
-    if (fit.relation === 'in' && outer > 1) for (const entry of fit.put) raise(entry.piece, entry.count * fit.count * outer)
+    if (fit.relation === 'in' && outer > 1)
+      for (const entry of fit.put) raise(entry.piece, entry.count * fit.count * outer)
   }
   for (const [name, piece] of set.pieces) if (piece.make !== null) counts.set(name, piece.make)
   return counts

@@ -47,7 +47,8 @@ function layerBounds(piece: FoldedPiece): { readonly least: number; readonly mos
 function unitsOf(model: SetModel, fit: Fit): readonly Unit[] {
   return fit.put.map(({ count, piece: name }) => {
     const piece = model.folded(name)
-    const holds = fit.holding !== null && (fit.put.length === 1 || piece.cavity !== null) ? model.folded(fit.holding) : null
+    const holds =
+      fit.holding !== null && (fit.put.length === 1 || piece.cavity !== null) ? model.folded(fit.holding) : null
     const held = holds === null ? constant(0) : stackHeight(holds)
     const bounds = layerBounds(piece)
     return {
@@ -61,7 +62,10 @@ function unitsOf(model: SetModel, fit: Fit): readonly Unit[] {
 }
 
 const isSheet = (piece: FoldedPiece): boolean =>
-  piece.form.kind === 'card' || piece.form.kind === 'envelope' || piece.form.kind === 'insert' || (piece.form.kind === 'bought' && piece.form.body !== 'box')
+  piece.form.kind === 'card' ||
+  piece.form.kind === 'envelope' ||
+  piece.form.kind === 'insert' ||
+  (piece.form.kind === 'bought' && piece.form.body !== 'box')
 
 /**
  * Height of a pack: Σ n[(content + N·t)(1 + b) + loft], b and loft shared by the pack so that their errors add.
@@ -98,7 +102,8 @@ export function loadOf(model: SetModel, fit: Fit): Load {
   const { height, pack } = packHeight(fit, units)
   const single = fit.put.length === 1 ? (fit.put[0]?.piece ?? null) : null
   // A closed box or any other solid thing is carried as it stands.
-  const isSolid = first.piece.form.kind === 'box' || first.piece.form.kind === 'sleeve' || first.piece.form.kind === 'bag'
+  const isSolid =
+    first.piece.form.kind === 'box' || first.piece.form.kind === 'sleeve' || first.piece.form.kind === 'bag'
   const plane =
     single !== null && isSolid
       ? model.closed(single)
@@ -109,7 +114,14 @@ export function loadOf(model: SetModel, fit: Fit): Load {
         }
   const isDivider = first.piece.form.kind === 'insert' && first.piece.form.standing
   const stands = isDivider || fit.stands === 'upright'
-  const pressed = add(...units.map((unit) => scale(unit.piece.raised === null ? unit.thickness : add(unit.thickness, scale(unit.piece.raised.height, -1)), unit.count)))
+  const pressed = add(
+    ...units.map((unit) =>
+      scale(
+        unit.piece.raised === null ? unit.thickness : add(unit.thickness, scale(unit.piece.raised.height, -1)),
+        unit.count,
+      ),
+    ),
+  )
   return {
     length: plane.length,
     width: stands ? plane.height : plane.width,

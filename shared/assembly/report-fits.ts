@@ -39,10 +39,15 @@ function reportFit(judged: JudgedSet, judgedFit: JudgedFit): FitReport {
     dependsOnCare: judgedFit.dependsOnCare,
     verdict: judgedFit.verdict,
     axes: judgedFit.axes.map(reportAxis),
-    give: give === null ? null : { axis: give.axis.clearance.axis, name: give.name, goesTo: give.goesTo, bow: give.bow },
+    give:
+      give === null ? null : { axis: give.axis.clearance.axis, name: give.name, goesTo: give.goesTo, bow: give.bow },
     seat: seat === null ? null : { z: seat.z.nominal, exposed: seat.exposed },
     scale: judged.options.scales === true ? scaleWindow(judged, judgedFit) : null,
-    papers: (judged.papers.get(fit.id) ?? []).map((trial) => ({ stock: trial.stock, verdict: trial.judged.verdict, closes: trial.judged.closes })),
+    papers: (judged.papers.get(fit.id) ?? []).map((trial) => ({
+      stock: trial.stock,
+      verdict: trial.judged.verdict,
+      closes: trial.judged.closes,
+    })),
     pack: clearances.load?.pack ?? null,
     workmanship: judged.options.workmanship ?? fit.workmanship ?? judged.workmanship,
   }

@@ -17,7 +17,13 @@ function detailsOf(piece: FoldedPiece): Record<string, unknown> {
         raised: piece.raised === null ? null : { height: quantityOf(piece.raised.height), rim: piece.raised.rim },
       }
     case 'envelope': {
-      const common = { style: form.style, pocket: form.pocket, throatAlong: form.throatAlong, layers: form.layers, thickness: quantityOf(piece.outside.height) }
+      const common = {
+        style: form.style,
+        pocket: form.pocket,
+        throatAlong: form.throatAlong,
+        layers: form.layers,
+        thickness: quantityOf(piece.outside.height),
+      }
       if (form.style === 'square-flap') return { ...common, back: form.back, sideFlap: form.sideFlap, flap: form.flap }
       const { left, right, bottom, flap } = form.corners
       return {
@@ -25,7 +31,13 @@ function detailsOf(piece: FoldedPiece): Record<string, unknown> {
         square: form.square,
         corners: { sides: [left, right], bottom, flap },
         seam: form.seam,
-        reach: { side: form.reach.left, left: form.reach.left, right: form.reach.right, bottom: form.reach.bottom, top: form.reach.top },
+        reach: {
+          side: form.reach.left,
+          left: form.reach.left,
+          right: form.reach.right,
+          bottom: form.reach.bottom,
+          top: form.reach.top,
+        },
       }
     }
     case 'box':
@@ -60,7 +72,11 @@ function reportPiece(judged: JudgedSet, name: string, piece: FoldedPiece): Piece
             width: quantityOf(cavity.width),
             ...(cavity.depth === null ? {} : { depth: quantityOf(cavity.depth) }),
           },
-    outside: { length: quantityOf(outside.length), width: quantityOf(outside.width), height: quantityOf(outside.height) },
+    outside: {
+      length: quantityOf(outside.length),
+      width: quantityOf(outside.width),
+      height: quantityOf(outside.height),
+    },
     make: judged.makes.get(name) ?? 1,
     made: given.made,
     measures: piece.measures.map(({ what, nominal, grid }) => ({ what, nominal, grid })),

@@ -48,7 +48,13 @@ function givenBand(clearance: Clearance, axis: AxisName): RequiredBand | null {
 }
 
 /** The requirement that holds for an axis: the fit's own or named clearance, else the model's default. */
-export function requirementOf(fit: Fit, fitCase: FitCase, axis: AxisName, contentSize: number, isOpen: boolean): Requirement {
+export function requirementOf(
+  fit: Fit,
+  fitCase: FitCase,
+  axis: AxisName,
+  contentSize: number,
+  isOpen: boolean,
+): Requirement {
   const own = fit.clearance
   const given = own === null ? null : givenBand(own, axis)
   const isStrict = own?.strict ?? false

@@ -40,6 +40,9 @@ export const feelsScale = (fit: JudgedFit): boolean =>
 export function scaleWindow(judged: JudgedSet, fit: JudgedFit): { readonly min: number; readonly max: number } | null {
   const at = judged.options.scale ?? 1
   if (fit.axes.some((axis) => !holdsAt(judged, axis, at))) return null
-  const edges = fit.axes.map((axis) => ({ min: edgeTowards(judged, axis, at, least), max: edgeTowards(judged, axis, at, most) }))
+  const edges = fit.axes.map((axis) => ({
+    min: edgeTowards(judged, axis, at, least),
+    max: edgeTowards(judged, axis, at, most),
+  }))
   return { min: Math.max(...edges.map((edge) => edge.min)), max: Math.min(...edges.map((edge) => edge.max)) }
 }

@@ -95,7 +95,9 @@ export function modelSet(set: TemplateSet, options: ModelOptions): SetModel {
     return made
   }
   const lidFitOf = (base: string): Fit | null =>
-    set.fits.find((fit) => fit.relation === 'over' && fit.to === base && folded(fit.put[0]?.piece ?? '').cavity?.shape === 'tray') ?? null
+    set.fits.find(
+      (fit) => fit.relation === 'over' && fit.to === base && folded(fit.put[0]?.piece ?? '').cavity?.shape === 'tray',
+    ) ?? null
 
   /** What lies in a box lies on one another; what stands reaches up by itself. */
   const contentHeight = (box: string): Dimension | null => {
@@ -129,7 +131,9 @@ export function modelSet(set: TemplateSet, options: ModelOptions): SetModel {
     return seat
   }
   const seat = (piece: string): Seat | null => {
-    const fit = set.fits.find((candidate) => candidate.relation === 'over' && (candidate.to === piece || candidate.put[0]?.piece === piece))
+    const fit = set.fits.find(
+      (candidate) => candidate.relation === 'over' && (candidate.to === piece || candidate.put[0]?.piece === piece),
+    )
     return fit === undefined ? null : seatOn(fit)
   }
   const closed = (piece: string): Girded => {

@@ -1,5 +1,13 @@
 import type { AxisReport, Report } from '../report/report.ts'
-import type { Comparison, ComparedSide, DimensionChange, InputChange, MarginChange, Mating, VerdictChange } from './comparison.ts'
+import type {
+  Comparison,
+  ComparedSide,
+  DimensionChange,
+  InputChange,
+  MarginChange,
+  Mating,
+  VerdictChange,
+} from './comparison.ts'
 import { compareDimensions, compareInputs } from './dimension-changes.ts'
 import { matingsOf } from './matings.ts'
 import { compareVerdicts } from './verdict-changes.ts'
@@ -23,8 +31,16 @@ function marginOf(fit: string, before: AxisReport, after: AxisReport): MarginCha
   const moved = after.clearance.nominal - before.clearance.nominal
   const bindsMore = after.binds - before.binds
   const rattlesMore = after.rattles - before.rattles
-  if (Math.abs(moved) < noiseFloor.mm && Math.abs(bindsMore) < noiseFloor.share && Math.abs(rattlesMore) < noiseFloor.share) return null
-  const isShrinking = bindsMore > noiseFloor.share || rattlesMore > noiseFloor.share || (Math.abs(bindsMore) <= noiseFloor.share && moved < -noiseFloor.mm)
+  if (
+    Math.abs(moved) < noiseFloor.mm &&
+    Math.abs(bindsMore) < noiseFloor.share &&
+    Math.abs(rattlesMore) < noiseFloor.share
+  )
+    return null
+  const isShrinking =
+    bindsMore > noiseFloor.share ||
+    rattlesMore > noiseFloor.share ||
+    (Math.abs(bindsMore) <= noiseFloor.share && moved < -noiseFloor.mm)
   return {
     fit,
     axis: after.axis,
@@ -72,10 +88,13 @@ function countOf(before: Report, after: Report, changes: readonly VerdictChange[
   const count = (flip: VerdictChange['flip']): number => changes.filter((change) => change.flip === flip).length
   const was = new Map(before.verdicts.map((verdict) => [verdict.fingerprint, verdict.status]))
   return {
-    newlyFailing: count('newly-failing') + changes.filter((change) => change.flip === 'added' && change.after === 'fail').length,
+    newlyFailing:
+      count('newly-failing') + changes.filter((change) => change.flip === 'added' && change.after === 'fail').length,
     newlyWarning: count('newly-warning'),
     nowPassing: count('now-passing'),
-    unchanged: after.verdicts.filter((verdict) => verdict.status !== 'unchecked' && was.get(verdict.fingerprint) === verdict.status).length,
+    unchanged: after.verdicts.filter(
+      (verdict) => verdict.status !== 'unchecked' && was.get(verdict.fingerprint) === verdict.status,
+    ).length,
     notChecked: after.verdicts.filter((verdict) => verdict.status === 'unchecked').length,
     added: count('added'),
     removed: count('removed'),
@@ -93,12 +112,15 @@ function propose(
   const [first] = unmated
   if (first !== undefined) return { step: 'major', why: `old and new pieces no longer mate: ${first.sentence}` }
   const gone = Object.keys(before.pieces).filter((piece) => !(piece in after.pieces))
-  if (gone.length > 0) return { step: 'major', why: `${gone.join(', ')} is gone, so old pieces miss what they belong to` }
+  if (gone.length > 0)
+    return { step: 'major', why: `${gone.join(', ')} is gone, so old pieces miss what they belong to` }
   const added = Object.keys(after.pieces).filter((piece) => !(piece in before.pieces))
   if (added.length > 0) return { step: 'minor', why: `new: ${added.join(', ')}; what was there before still mates` }
   if (dimensions.length > 0) return { step: 'minor', why: 'sizes moved; old and new pieces still mate' }
   if (inputs.length > 0) return { step: 'patch', why: 'judged with other inputs; no size of any piece moved' }
-  return before.digest === after.digest ? { step: 'none', why: 'nothing changed' } : { step: 'patch', why: 'only words changed' }
+  return before.digest === after.digest
+    ? { step: 'none', why: 'nothing changed' }
+    : { step: 'patch', why: 'only words changed' }
 }
 
 /**
@@ -136,10 +158,11 @@ export function compareReports(before: Report, after: Report): Comparison {
     matings,
     oldPiecesMate: matings.every((mating) => mating.verdict !== 'fail'),
     proposal: propose(before, after, matings, dimensions, inputs),
-    isEmpty: whyNot === null && changes.length === 0 && margins.length === 0 && dimensions.length === 0 && inputs.length === 0,
+    isEmpty:
+      whyNot === null && changes.length === 0 && margins.length === 0 && dimensions.length === 0 && inputs.length === 0,
   }
 }
 
 /** True where something got worse that was not already known. */
-export const hasRegression = (comparison: Comparison): boolean => comparison.changes.some((change) => change.isRegression)
-
+export const hasRegression = (comparison: Comparison): boolean =>
+  comparison.changes.some((change) => change.isRegression)

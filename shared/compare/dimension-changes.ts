@@ -9,7 +9,8 @@ interface ReportedMeasure {
   readonly nominal: number
 }
 
-const isQuantity = (value: unknown): value is Quantity => typeof value === 'object' && value !== null && 'nominal' in value && 'sigma' in value
+const isQuantity = (value: unknown): value is Quantity =>
+  typeof value === 'object' && value !== null && 'nominal' in value && 'sigma' in value
 
 /** What a maker sets on a piece, and what comes of it: marks, then inside and outside. */
 function dimensionsOf(piece: PieceReport): ReadonlyMap<string, number> {
@@ -19,7 +20,8 @@ function dimensionsOf(piece: PieceReport): ReadonlyMap<string, number> {
     ['inside', piece.inside],
     ['outside', piece.outside],
   ] as const) {
-    for (const [axis, size] of Object.entries(sizes ?? {})) if (isQuantity(size)) found.set(`${side} ${axis}`, size.nominal)
+    for (const [axis, size] of Object.entries(sizes ?? {}))
+      if (isQuantity(size)) found.set(`${side} ${axis}`, size.nominal)
   }
   const thickness = piece['thickness']
   if (isQuantity(thickness)) found.set('thickness', thickness.nominal)
@@ -28,7 +30,12 @@ function dimensionsOf(piece: PieceReport): ReadonlyMap<string, number> {
 
 const mentions = (report: Report, piece: string): readonly string[] =>
   report.fits
-    .filter((fit) => fit.to === piece || fit.holding === piece || fit.put.split(', ').some((entry) => entry.replace(/^\d+ /, '') === piece))
+    .filter(
+      (fit) =>
+        fit.to === piece ||
+        fit.holding === piece ||
+        fit.put.split(', ').some((entry) => entry.replace(/^\d+ /, '') === piece),
+    )
     .map((fit) => fit.id)
 
 /** Every dimension that moved, appeared or went, by piece and name, largest first. */
@@ -49,7 +56,9 @@ export function compareDimensions(before: Report, after: Report): readonly Dimen
     }
   }
   return changes.toSorted(
-    (a, b) => Math.abs(b.delta ?? Infinity) - Math.abs(a.delta ?? Infinity) || (`${a.piece} ${a.what}` < `${b.piece} ${b.what}` ? -1 : 1),
+    (a, b) =>
+      Math.abs(b.delta ?? Infinity) - Math.abs(a.delta ?? Infinity) ||
+      (`${a.piece} ${a.what}` < `${b.piece} ${b.what}` ? -1 : 1),
   )
 }
 
@@ -70,10 +79,15 @@ function inputsOf(report: Report): ReadonlyMap<string, string> {
     flat.set(`stock ${name} caliper`, `${String(stock.caliper)} ± ${String(Number(stock.halfWidth.toFixed(4)))} mm`)
     flat.set(`stock ${name} grammage`, stock.grammage === null ? 'not given' : `${String(stock.grammage)} g/m²`)
   }
-  for (const [name, size] of Object.entries(report.inputs.sizes)) flat.set(`size ${name}`, `${String(size.length)} x ${String(size.width)} mm`)
-  for (const [name, clearance] of Object.entries(report.inputs.clearances)) flat.set(`clearance ${name}`, JSON.stringify(clearance))
+  for (const [name, size] of Object.entries(report.inputs.sizes))
+    flat.set(`size ${name}`, `${String(size.length)} x ${String(size.width)} mm`)
+  for (const [name, clearance] of Object.entries(report.inputs.clearances))
+    flat.set(`clearance ${name}`, JSON.stringify(clearance))
   for (const [name, maker] of Object.entries(report.inputs.makers)) {
-    flat.set(`makers ${name}`, `cut ${String(maker.cut)}, score ${String(maker.score)}, fence ${String(maker.fence)} mm`)
+    flat.set(
+      `makers ${name}`,
+      `cut ${String(maker.cut)}, score ${String(maker.score)}, fence ${String(maker.fence)} mm`,
+    )
   }
   return flat
 }

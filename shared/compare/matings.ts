@@ -9,7 +9,8 @@ import type { Mating } from './comparison.ts'
 
 type Side = 'before' | 'after'
 
-const isQuantity = (value: unknown): value is Quantity => typeof value === 'object' && value !== null && 'nominal' in value
+const isQuantity = (value: unknown): value is Quantity =>
+  typeof value === 'object' && value !== null && 'nominal' in value
 
 /** The piece on the outside of a fit: what is put over or around, or what it is put in. */
 const outerOf = (fit: FitReport): string => (fit.relation === 'in' ? fit.to : fit.put)
@@ -54,8 +55,19 @@ function crossed(outerReport: Report, innerReport: Report, fitId: string, axis: 
   return other === null || same === null ? null : add(other, scale(same, -1), own)
 }
 
-function judgeCrossing(target: number, floor: number, fit: FitReport, axis: AxisReport, clearance: Dimension): { verdict: FitVerdict; binds: number } {
-  const give = fit.relation === 'over' && (axis.axis === 'length' || axis.axis === 'width') ? modelDefaults.lidGive.value : fit.give?.axis === axis.axis ? -fit.give.goesTo : 0
+function judgeCrossing(
+  target: number,
+  floor: number,
+  fit: FitReport,
+  axis: AxisReport,
+  clearance: Dimension,
+): { verdict: FitVerdict; binds: number } {
+  const give =
+    fit.relation === 'over' && (axis.axis === 'length' || axis.axis === 'width')
+      ? modelDefaults.lidGive.value
+      : fit.give?.axis === axis.axis
+        ? -fit.give.goesTo
+        : 0
   const judged = judgeAxis(
     {
       axis: axis.axis,
@@ -88,16 +100,32 @@ function mate(before: Report, after: Report, fit: FitReport, outerFrom: Side): M
   const base = { fit: fit.id, put: fit.put, to: fit.to, putFrom, toFrom }
   const worst = known.toSorted((a, b) => b.binds - a.binds)[0]
   if (worst === undefined || known.length < judged.length) {
-    return { ...base, verdict: 'unchecked', closes: null, worstAxis: null, sentence: `${words}: cannot be told from these two reports` }
+    return {
+      ...base,
+      verdict: 'unchecked',
+      closes: null,
+      worstAxis: null,
+      sentence: `${words}: cannot be told from these two reports`,
+    }
   }
   const verdict = known.map((entry) => entry.verdict).reduce(worse, 'pass')
   const share = Math.round((1 - worst.binds) * 100)
   const said = verdict === 'fail' ? 'does not mate' : verdict === 'warn' ? 'mates with care' : 'mates'
-  return { ...base, verdict, closes: 1 - worst.binds, worstAxis: worst.axis.axis, sentence: `${words}: ${said}, about ${String(share)} of 100` }
+  return {
+    ...base,
+    verdict,
+    closes: 1 - worst.binds,
+    worstAxis: worst.axis.axis,
+    sentence: `${words}: ${said}, about ${String(share)} of 100`,
+  }
 }
 
 const sameQuantity = (a: Quantity | undefined, b: Quantity | undefined): boolean =>
-  a === b || (a !== undefined && b !== undefined && Math.abs(a.nominal - b.nominal) < sameLength && Math.abs(a.sigma - b.sigma) < sameLength)
+  a === b ||
+  (a !== undefined &&
+    b !== undefined &&
+    Math.abs(a.nominal - b.nominal) < sameLength &&
+    Math.abs(a.sigma - b.sigma) < sameLength)
 
 /** Whether a piece is the same in both reports as far as mating goes. */
 function isSamePiece(a: PieceReport | undefined, b: PieceReport | undefined): boolean {

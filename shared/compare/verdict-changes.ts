@@ -2,7 +2,15 @@ import type { Report, Status, Verdict } from '../report/report.ts'
 import type { DimensionChange, Flip, VerdictChange } from './comparison.ts'
 
 /** How bad a status is to someone who already lives with the other one. A waiver is a known failure, not a new one. */
-const rank: Readonly<Record<Status, number>> = { pass: 0, info: 0, unchecked: 0, waived: 1, warn: 2, fail: 3, crashed: 4 }
+const rank: Readonly<Record<Status, number>> = {
+  pass: 0,
+  info: 0,
+  unchecked: 0,
+  waived: 1,
+  warn: 2,
+  fail: 3,
+  crashed: 4,
+}
 
 function flipOf(before: Status | null, after: Status | null): Flip {
   if (before === null) return 'added'
@@ -40,12 +48,25 @@ function causesOf(report: Report, subject: string, dimensions: readonly Dimensio
 
 export const signed = (mm: number): string => `${mm < 0 ? '−' : '+'}${String(Number(Math.abs(mm).toFixed(3)))} mm`
 
-const byFingerprint = (report: Report): ReadonlyMap<string, Verdict> => new Map(report.verdicts.map((verdict) => [verdict.fingerprint, verdict]))
+const byFingerprint = (report: Report): ReadonlyMap<string, Verdict> =>
+  new Map(report.verdicts.map((verdict) => [verdict.fingerprint, verdict]))
 
-const order: readonly Flip[] = ['newly-failing', 'newly-warning', 'added', 'newly-waived', 'removed', 'now-passing', 'milder']
+const order: readonly Flip[] = [
+  'newly-failing',
+  'newly-warning',
+  'added',
+  'newly-waived',
+  'removed',
+  'now-passing',
+  'milder',
+]
 
 /** Verdicts matched by identity whose status differs, worst first, fits before everything else. */
-export function compareVerdicts(before: Report, after: Report, dimensions: readonly DimensionChange[]): readonly VerdictChange[] {
+export function compareVerdicts(
+  before: Report,
+  after: Report,
+  dimensions: readonly DimensionChange[],
+): readonly VerdictChange[] {
   const was = byFingerprint(before)
   const is = byFingerprint(after)
   const changes: VerdictChange[] = []

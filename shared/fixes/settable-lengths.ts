@@ -22,7 +22,13 @@ type Pair = { readonly length: Millimetres; readonly width: Millimetres }
 const sideWords = { length: { more: 'longer', less: 'shorter' }, width: { more: 'wider', less: 'narrower' } } as const
 
 /** The two lengths of a size written as `A x B`. */
-function pair(piece: PieceGiven, key: string, size: Pair, verb: string, put: (size: Pair) => PieceGiven): readonly SettableLength[] {
+function pair(
+  piece: PieceGiven,
+  key: string,
+  size: Pair,
+  verb: string,
+  put: (size: Pair) => PieceGiven,
+): readonly SettableLength[] {
   return (['length', 'width'] as const).map((side) => {
     const moved = (value: Millimetres): Pair => ({ ...size, [side]: value })
     // The larger side is the length whichever way the author wrote it.
@@ -59,7 +65,10 @@ function boxLengths(given: BoxGiven): readonly SettableLength[] {
   }
   const { blank, wall } = given.by
   if (blank === 'fit' || wall === 'fit') return []
-  const cuts = pair(given, 'blank', blank, `cut ${given.name}`, (size) => ({ ...given, by: { given: 'blank', blank: size, wall } }))
+  const cuts = pair(given, 'blank', blank, `cut ${given.name}`, (size) => ({
+    ...given,
+    by: { given: 'blank', blank: size, wall },
+  }))
   const all = [...wall.length, ...wall.width]
   const first = all[0] ?? 0
   if (!all.every((each) => Math.abs(each - first) < 1e-9)) return cuts
@@ -70,7 +79,10 @@ function boxLengths(given: BoxGiven): readonly SettableLength[] {
       path: ['pieces', given.name, 'wall'],
       value: first,
       grid: 'score',
-      with: (value) => ({ ...given, by: { given: 'blank', blank, wall: { length: [value, value], width: [value, value] } } }),
+      with: (value) => ({
+        ...given,
+        by: { given: 'blank', blank, wall: { length: [value, value], width: [value, value] } },
+      }),
       listed: (value) => [value],
       words: { verb: `score ${given.name}`, more: 'deeper', less: 'shallower' },
     },
@@ -106,7 +118,9 @@ export function settableLengths(given: PieceGiven): readonly SettableLength[] {
       return envelopeLengths(given)
     case 'insert':
     case 'divider':
-      return given.size === 'fit' ? [] : pair(given, 'size', given.size, `cut ${given.name}`, (size) => ({ ...given, size }))
+      return given.size === 'fit'
+        ? []
+        : pair(given, 'size', given.size, `cut ${given.name}`, (size) => ({ ...given, size }))
     case 'card':
       return given.folded === 'fit' || given.blank !== null
         ? []
@@ -131,7 +145,12 @@ export function settableLengths(given: PieceGiven): readonly SettableLength[] {
       if (inside === 'fit' || given.blank !== null) return []
       return (['width', 'depth', 'height'] as const).map((side) => {
         const moved = (value: Millimetres) => ({ ...inside, [side]: value })
-        const words = side === 'height' ? { more: 'taller', less: 'shorter' } : side === 'depth' ? { more: 'deeper', less: 'shallower' } : sideWords.width
+        const words =
+          side === 'height'
+            ? { more: 'taller', less: 'shorter' }
+            : side === 'depth'
+              ? { more: 'deeper', less: 'shallower' }
+              : sideWords.width
         return {
           piece: given.name,
           path: ['pieces', given.name, 'inside'],

@@ -11,11 +11,22 @@ import { formatLength, formatSize } from '../units/format-length.ts'
 import { roundToGrid } from '../units/grid.ts'
 import { settableLengths, type SettableLength } from './settable-lengths.ts'
 
-const severity: Readonly<Record<Status, number>> = { pass: 0, info: 0, unchecked: 0, waived: 0, warn: 1, fail: 2, crashed: 3 }
+const severity: Readonly<Record<Status, number>> = {
+  pass: 0,
+  info: 0,
+  unchecked: 0,
+  waived: 0,
+  warn: 1,
+  fail: 2,
+  crashed: 3,
+}
 
 /** A set with one piece replaced. */
 export function withPiece(set: TemplateSet, piece: PieceGiven): TemplateSet {
-  return { ...set, pieces: new Map([...set.pieces].map(([name, given]) => [name, name === piece.name ? piece : given])) }
+  return {
+    ...set,
+    pieces: new Map([...set.pieces].map(([name, given]) => [name, name === piece.name ? piece : given])),
+  }
 }
 
 /** How far the clearance must move up (positive) or down for the axis to reach the target. */
@@ -34,7 +45,9 @@ const findAxis = (judged: JudgedSet, fit: string, axis: string): JudgedAxis | un
 function movedText(set: TemplateSet, length: SettableLength, value: number): string {
   const listed = length.listed(value)
   const [only] = listed
-  return listed.length === 1 && only !== undefined ? formatLength(only, set.tokens.units) : formatSize(listed, set.tokens.units)
+  return listed.length === 1 && only !== undefined
+    ? formatLength(only, set.tokens.units)
+    : formatSize(listed, set.tokens.units)
 }
 
 interface Candidate {
@@ -44,7 +57,15 @@ interface Candidate {
 }
 
 /** One length moved on the ruler grid as far as this axis needs, if it can help at all. */
-function tryLength(judged: JudgedSet, fit: string, axisName: string, axis: JudgedAxis, needed: number, length: SettableLength, most: number): Candidate | null {
+function tryLength(
+  judged: JudgedSet,
+  fit: string,
+  axisName: string,
+  axis: JudgedAxis,
+  needed: number,
+  length: SettableLength,
+  most: number,
+): Candidate | null {
   const grid = judged.set.tokens.ruler[length.grid]
   const probe = axisAfter(judged, fit, axisName, length, length.value + grid)
   if (probe === null) return null
@@ -63,9 +84,19 @@ function tryLength(judged: JudgedSet, fit: string, axisName: string, axis: Judge
   return null
 }
 
-function axisAfter(judged: JudgedSet, fit: string, axisName: string, length: SettableLength, value: number): { axis: JudgedAxis; after: JudgedSet } | null {
+function axisAfter(
+  judged: JudgedSet,
+  fit: string,
+  axisName: string,
+  length: SettableLength,
+  value: number,
+): { axis: JudgedAxis; after: JudgedSet } | null {
   try {
-    const after = judgeSet(withPiece(judged.set, length.with(value)), { ...judged.options, fixes: false, scales: false })
+    const after = judgeSet(withPiece(judged.set, length.with(value)), {
+      ...judged.options,
+      fixes: false,
+      scales: false,
+    })
     const axis = findAxis(after, fit, axisName)
     return axis === undefined ? null : { axis, after }
   } catch {
@@ -81,7 +112,11 @@ function worsensNothing(before: readonly Verdict[], after: readonly Verdict[]): 
 }
 
 /** Thickest paper with which the axis would pass, per stock that matters; the one that has to change least. */
-function paperLimit(judged: JudgedSet, axis: JudgedAxis, needed: number): { readonly stock: string; readonly caliper: number } | null {
+function paperLimit(
+  judged: JudgedSet,
+  axis: JudgedAxis,
+  needed: number,
+): { readonly stock: string; readonly caliper: number } | null {
   const limits = axis.clearance.clearance.sources.flatMap((source) => {
     const name = /^caliper\((.+)\)$/.exec(source.name)?.[1]
     if (name === undefined || source.coefficient * needed >= 0) return []
@@ -100,7 +135,12 @@ const sentence = (text: string): string => text.charAt(0).toUpperCase() + text.s
  * least millimetres; beside it the thickest paper that would do.
  * @returns `null` where nothing of the kind helps
  */
-export function smallestChange(judged: JudgedSet, verdict: Verdict, verdicts: readonly Verdict[], rules: readonly Rule[]): Fix | null {
+export function smallestChange(
+  judged: JudgedSet,
+  verdict: Verdict,
+  verdicts: readonly Verdict[],
+  rules: readonly Rule[],
+): Fix | null {
   const [fitId = '', axisName = ''] = verdict.subject.split(':')
   const axis = findAxis(judged, fitId, axisName)
   const fit = judged.fits.find((candidate) => candidate.fit.id === fitId)
@@ -122,7 +162,10 @@ export function smallestChange(judged: JudgedSet, verdict: Verdict, verdicts: re
       if (candidate !== null) candidates.push(candidate)
     }
   }
-  candidates.sort((a, b) => Math.abs(a.delta) - Math.abs(b.delta) || Number(b.length.piece === outer) - Number(a.length.piece === outer))
+  candidates.sort(
+    (a, b) =>
+      Math.abs(a.delta) - Math.abs(b.delta) || Number(b.length.piece === outer) - Number(a.length.piece === outer),
+  )
   for (const { length, delta, after } of candidates) {
     if (!worsensNothing(verdicts, applyRules(after, rules))) continue
     const by = formatLength(Math.abs(delta), units)
@@ -133,5 +176,10 @@ export function smallestChange(judged: JudgedSet, verdict: Verdict, verdicts: re
   }
   return paper === null
     ? null
-    : { path: ['stocks', paper.stock, 'caliper'], from: formatLength(judged.model.stock(paper.stock).caliper ?? 0, 'mm'), to: formatLength(paper.caliper, 'mm'), note: `Use ${paper.stock} no thicker than ${formatLength(paper.caliper, 'mm')}.` }
+    : {
+        path: ['stocks', paper.stock, 'caliper'],
+        from: formatLength(judged.model.stock(paper.stock).caliper ?? 0, 'mm'),
+        to: formatLength(paper.caliper, 'mm'),
+        note: `Use ${paper.stock} no thicker than ${formatLength(paper.caliper, 'mm')}.`,
+      }
 }

@@ -23,6 +23,11 @@ export function quantityOf(dimension: Dimension): Quantity {
 export function dimensionOf(quantity: Quantity): Dimension {
   return {
     nominal: quantity.nominal,
-    sources: quantity.sources.map((source) => ({ name: source.name, coefficient: source.effect, halfWidth: 1, shape: source.shape })),
+    sources: quantity.sources.map((source) => ({
+      name: source.name,
+      coefficient: source.effect,
+      halfWidth: 1,
+      shape: source.shape,
+    })),
   }
 }

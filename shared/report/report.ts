@@ -50,13 +50,22 @@ export interface FitReport {
   readonly dependsOnCare: boolean
   readonly verdict: 'pass' | 'warn' | 'fail'
   readonly axes: readonly AxisReport[]
-  readonly give: { readonly axis: AxisName; readonly name: 'snug' | 'push-on'; readonly goesTo: number; readonly bow: number | null } | null
+  readonly give: {
+    readonly axis: AxisName
+    readonly name: 'snug' | 'push-on'
+    readonly goesTo: number
+    readonly bow: number | null
+  } | null
   /** Height at which a lid rests, and how much of the base shows below it. */
   readonly seat: { readonly z: number; readonly exposed: number } | null
   /** Print scales within 0.9..1.1 at which the fit holds; `null` where not asked for or none. */
   readonly scale: { readonly min: number; readonly max: number } | null
   /** The same fit judged with other papers. */
-  readonly papers: readonly { readonly stock: string; readonly verdict: 'pass' | 'warn' | 'fail'; readonly closes: number }[]
+  readonly papers: readonly {
+    readonly stock: string
+    readonly verdict: 'pass' | 'warn' | 'fail'
+    readonly closes: number
+  }[]
   /** How many each verdict's pack height is: minimum, nominal, maximum; `null` where nothing is stacked. */
   readonly pack: { readonly min: number; readonly nominal: number; readonly max: number } | null
   readonly workmanship: string
@@ -143,7 +152,17 @@ export interface Report {
   readonly floor: number
   readonly ruler: { readonly cut: number; readonly score: number }
   readonly inputs: {
-    readonly stocks: Readonly<Record<string, { readonly caliper: number; readonly halfWidth: number; readonly grammage: number | null; readonly estimated: boolean }>>
+    readonly stocks: Readonly<
+      Record<
+        string,
+        {
+          readonly caliper: number
+          readonly halfWidth: number
+          readonly grammage: number | null
+          readonly estimated: boolean
+        }
+      >
+    >
     readonly sizes: Readonly<Record<string, { readonly length: number; readonly width: number }>>
     readonly clearances: Readonly<Record<string, unknown>>
     readonly makers: Readonly<Record<string, { readonly cut: number; readonly score: number; readonly fence: number }>>

@@ -7,7 +7,12 @@ const cancelled = 1e-12
 export const constant = (nominal: number): Dimension => ({ nominal, sources: [] })
 
 /** One named source with its coefficient and half-width. */
-export const source = (name: string, coefficient: number, halfWidth: number, shape: SourceShape = 'uniform'): Source => ({
+export const source = (
+  name: string,
+  coefficient: number,
+  halfWidth: number,
+  shape: SourceShape = 'uniform',
+): Source => ({
   name,
   coefficient,
   halfWidth,
@@ -52,7 +57,8 @@ function combine(terms: readonly (readonly [Dimension, number])[], constantPart 
   return { nominal, sources: alive(merged) }
 }
 
-export const add = (...dimensions: readonly Dimension[]): Dimension => combine(dimensions.map((term) => [term, 1] as const))
+export const add = (...dimensions: readonly Dimension[]): Dimension =>
+  combine(dimensions.map((term) => [term, 1] as const))
 
 export const subtract = (from: Dimension, less: Dimension): Dimension =>
   combine([
@@ -86,7 +92,13 @@ export const larger = (a: Dimension, b: Dimension): Dimension => (b.nominal > a.
 export const smaller = (a: Dimension, b: Dimension): Dimension => (b.nominal < a.nominal ? b : a)
 
 /** The same dimension with the half-widths of some sources scaled. */
-export const withScaledHalfWidths = (of: Dimension, factor: number, isScaled: (name: string) => boolean): Dimension => ({
+export const withScaledHalfWidths = (
+  of: Dimension,
+  factor: number,
+  isScaled: (name: string) => boolean,
+): Dimension => ({
   nominal: of.nominal,
-  sources: of.sources.map((entry) => (isScaled(entry.name) ? { ...entry, halfWidth: entry.halfWidth * factor } : entry)),
+  sources: of.sources.map((entry) =>
+    isScaled(entry.name) ? { ...entry, halfWidth: entry.halfWidth * factor } : entry,
+  ),
 })
