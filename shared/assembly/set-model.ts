@@ -42,6 +42,8 @@ export interface SetModel {
   closed(piece: string): Girded
   /** What a fit puts, as one load. */
   load(fit: Fit): Load
+  /** Height of everything that is put into a box; `null` where nothing is. */
+  contentHeight(box: string): Dimension | null
   /** Whether a fit puts a lid over that box. */
   hasLid(box: string): boolean
 }
@@ -159,6 +161,7 @@ export function modelSet(set: TemplateSet, options: ModelOptions): SetModel {
     seat,
     closed,
     load: (fit) => loadOf(model, fit),
+    contentHeight,
     hasLid: (box) => lidFitOf(box) !== null,
   }
   return model
