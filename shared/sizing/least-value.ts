@@ -30,7 +30,9 @@ const needs = (bound: Bound, value: number, target: number): number => {
  * Neighbours are tried, so that what comes back passes and the next smaller does not.
  */
 export function leastValue(bounds: readonly Bound[], start: number, grid: number, target: number): Least | null {
-  const asked = bounds.map((bound) => ({ bound, value: start + needs(bound, start, target) })).filter(({ value }) => value > -Infinity)
+  const asked = bounds
+    .map((bound) => ({ bound, value: start + needs(bound, start, target) }))
+    .filter(({ value }) => value > -Infinity)
   const hardest = asked.toSorted((a, b) => b.value - a.value)[0]
   if (hardest === undefined) return null
   const passes = (value: number): boolean =>
@@ -40,7 +42,8 @@ export function leastValue(bounds: readonly Bound[], start: number, grid: number
     })
   let value = ceilToGrid(hardest.value, grid)
   for (let step = 0; step < 20 && !passes(value); step += 1) value = ceilToGrid(value + grid, grid)
-  while (value - grid > 0 && passes(ceilToGrid(value - grid - 1e-9, grid))) value = ceilToGrid(value - grid - 1e-9, grid)
+  while (value - grid > 0 && passes(ceilToGrid(value - grid - 1e-9, grid)))
+    value = ceilToGrid(value - grid - 1e-9, grid)
   return { value, unrounded: hardest.value, limitedBy: hardest.bound.requirement }
 }
 

@@ -32,7 +32,8 @@ export function openPieces(set: TemplateSet, open: readonly Path[]): readonly Op
     if (ordered.includes(name) || above.has(name)) return
     for (const need of needs(name)) {
       // A flat thing that fills a box waits for the box, not the box for it.
-      const isFiller = set.pieces.get(need)?.kind === 'divider' || (set.pieces.get(need)?.kind === 'insert' && keys.has(need))
+      const isFiller =
+        set.pieces.get(need)?.kind === 'divider' || (set.pieces.get(need)?.kind === 'insert' && keys.has(need))
       if (!isFiller) visit(need, new Set([...above, name]))
     }
     ordered.push(name)
@@ -45,4 +46,6 @@ export function openPieces(set: TemplateSet, open: readonly Path[]): readonly Op
 }
 
 const aroundOf = (piece: PieceGiven | undefined): readonly string[] =>
-  piece !== undefined && (piece.kind === 'sleeve' || piece.kind === 'band') && piece.around !== null ? [piece.around] : []
+  piece !== undefined && (piece.kind === 'sleeve' || piece.kind === 'band') && piece.around !== null
+    ? [piece.around]
+    : []

@@ -30,13 +30,18 @@ const boxOf = (given: BoxGiven, length: number, width: number, wall: number): Bo
   by: { given: 'blank', blank: { length, width }, wall: { length: [wall, wall], width: [wall, wall] } },
 })
 
-const withGiven = (set: TemplateSet, given: BoxGiven): TemplateSet => ({ ...set, pieces: new Map([...set.pieces, [given.name, given]]) })
+const withGiven = (set: TemplateSet, given: BoxGiven): TemplateSet => ({
+  ...set,
+  pieces: new Map([...set.pieces, [given.name, given]]),
+})
 
 /** Fits that make the box's inside: what lies in it, or the base it goes over. Dividers are cut to the box instead. */
 function shapingFits(set: TemplateSet, name: string): readonly Fit[] {
   return set.fits.filter(
     (fit) =>
-      (fit.relation === 'in' && fit.to === name && !fit.put.some((entry) => set.pieces.get(entry.piece)?.kind === 'divider')) ||
+      (fit.relation === 'in' &&
+        fit.to === name &&
+        !fit.put.some((entry) => set.pieces.get(entry.piece)?.kind === 'divider')) ||
       (fit.relation === 'over' && fit.put[0]?.piece === name),
   )
 }
@@ -49,7 +54,8 @@ function planeBounds(trial: Trial, given: BoxGiven, axis: 'length' | 'width', wa
     // A size is sought for things as they lie; the check may still turn them where that binds less.
     const asLaid: Fit = { ...fit, turn: fit.turn ?? 'none' }
     const at = (value: number) => {
-      const piece = axis === 'length' ? boxOf(given, value, value, wall) : boxOf(given, Math.max(roomy, value), value, wall)
+      const piece =
+        axis === 'length' ? boxOf(given, value, value, wall) : boxOf(given, Math.max(roomy, value), value, wall)
       const judged = judgeFit(modelSet(withGiven(trial.set, piece), trial.options), asLaid)
       const found = judged.axes.find((candidate) => candidate.clearance.axis === axis)
       if (found === undefined) throw new RangeError(`${fit.id} has no ${axis}`)
@@ -72,12 +78,19 @@ function wallOfBase(whole: TemplateSet, trial: Trial, given: BoxGiven): Least | 
   const min = (lid === undefined ? inside?.clearance?.depth?.min : lid.clearance?.headspace?.min) ?? 0
   const content = modelSet(withGiven(trial.set, boxOf(given, 200, 200, 50)), trial.options).contentHeight(given.name)
   if (content === null) {
-    return { requirement: `depth of ${given.name}`, message: `nothing lies in ${given.name}, so nothing says how deep it must be`, nearest: `give its wall, or a fit that puts something in ${given.name}` }
+    return {
+      requirement: `depth of ${given.name}`,
+      message: `nothing lies in ${given.name}, so nothing says how deep it must be`,
+      nearest: `give its wall, or a fit that puts something in ${given.name}`,
+    }
   }
   const found = leastValue(
     [
       {
-        requirement: lid === undefined ? `depth of ${given.name}: at least ${String(min)} mm over the pack` : `${lid.id}, headspace: at least ${String(min)} mm`,
+        requirement:
+          lid === undefined
+            ? `depth of ${given.name}: at least ${String(min)} mm over the pack`
+            : `${lid.id}, headspace: at least ${String(min)} mm`,
         clearanceAt: (wall) => {
           const box = modelSet(withGiven(trial.set, boxOf(given, 200, 200, wall)), trial.options).folded(given.name)
           return { clearance: subtract(box.cavity?.depth ?? content, content), band: { min, max: null } }
@@ -88,7 +101,9 @@ function wallOfBase(whole: TemplateSet, trial: Trial, given: BoxGiven): Least | 
     whole.tokens.ruler.score,
     whole.tokens.target,
   )
-  return found ?? { requirement: `depth of ${given.name}`, message: `no depth is asked of ${given.name}`, nearest: null }
+  return (
+    found ?? { requirement: `depth of ${given.name}`, message: `no depth is asked of ${given.name}`, nearest: null }
+  )
 }
 
 /** Depth of a lid: part of its base's wall, so that enough of the base shows to lift it by. */
@@ -97,7 +112,11 @@ function wallOfLid(trial: Trial, base: string, grid: number): Least {
   const wanted = lidShare * wall
   const most = floorToGrid(wall - modelDefaults.openingExposed.value, grid)
   const value = Math.max(grid, Math.min(ceilToGrid(wanted, grid), most > 2 * grid ? most : ceilToGrid(wanted, grid)))
-  return { value, unrounded: wanted, limitedBy: `${String(lidShare * 100)} % of the wall of ${base}, which leaves some of it showing (common practice)` }
+  return {
+    value,
+    unrounded: wanted,
+    limitedBy: `${String(lidShare * 100)} % of the wall of ${base}, which leaves some of it showing (common practice)`,
+  }
 }
 
 const isUnsizable = (found: Least | Unsizable): found is Unsizable => 'message' in found
@@ -124,7 +143,11 @@ export function sizeBox(whole: TemplateSet, trial: Trial, given: BoxGiven): Size
   const length = leastValue(planeBounds(trial, given, 'length', wall.value), roomy, ruler.cut, target)
   const width = leastValue(planeBounds(trial, given, 'width', wall.value), roomy, ruler.cut, target)
   if (length === null || width === null) {
-    return { requirement: `inside of ${given.name}`, message: `nothing goes into ${given.name} and it goes over nothing, so nothing says how large it must be`, nearest: `give its blank, or a fit that names ${given.name}` }
+    return {
+      requirement: `inside of ${given.name}`,
+      message: `nothing goes into ${given.name} and it goes over nothing, so nothing says how large it must be`,
+      nearest: `give its blank, or a fit that names ${given.name}`,
+    }
   }
   const path = ['pieces', given.name, 'blank']
   return {

@@ -1,6 +1,11 @@
 import { judgeFit } from '../assembly/judge-fit.ts'
 import { modelSet, type ModelOptions } from '../assembly/set-model.ts'
-import type { BaronialByCorners, BaronialByPocket, EnvelopeGiven, SquareFlapGiven } from '../pieces/envelope/envelope-given.ts'
+import type {
+  BaronialByCorners,
+  BaronialByPocket,
+  EnvelopeGiven,
+  SquareFlapGiven,
+} from '../pieces/envelope/envelope-given.ts'
 import type { Fit, TemplateSet } from '../template/template-model.ts'
 import { ceilToGrid, floorToGrid } from '../units/grid.ts'
 import { leastValue, requirementInWords, type Bound, type Least } from './least-value.ts'
@@ -24,7 +29,9 @@ function bounds(trial: Trial, given: Open, axis: 'length' | 'width'): readonly B
     const at = (value: number) => {
       const piece = axis === 'length' ? pocketOf(given, value, value) : pocketOf(given, Math.max(roomy, value), value)
       const set = { ...trial.set, pieces: new Map([...trial.set.pieces, [given.name, piece as EnvelopeGiven]]) }
-      const found = judgeFit(modelSet(set, trial.options), asLaid).axes.find((candidate) => candidate.clearance.axis === axis)
+      const found = judgeFit(modelSet(set, trial.options), asLaid).axes.find(
+        (candidate) => candidate.clearance.axis === axis,
+      )
       if (found === undefined) throw new RangeError(`${fit.id} has no ${axis}`)
       return found
     }
@@ -77,7 +84,11 @@ export function sizeEnvelope(whole: TemplateSet, trial: Trial, given: Open): Siz
   const length = leastValue(bounds(trial, given, 'length'), roomy, grid, target)
   const width = leastValue(bounds(trial, given, 'width'), roomy, grid, target)
   if (length === null || width === null) {
-    return { requirement: `pocket of ${given.name}`, message: `nothing goes into ${given.name}, so nothing says how large its pocket must be`, nearest: `give its pocket, or a fit that puts something in ${given.name}` }
+    return {
+      requirement: `pocket of ${given.name}`,
+      message: `nothing goes into ${given.name}, so nothing says how large its pocket must be`,
+      nearest: `give its pocket, or a fit that puts something in ${given.name}`,
+    }
   }
   const pocketPath = ['pieces', given.name, 'pocket']
   if (!isByCorners) {
@@ -91,15 +102,28 @@ export function sizeEnvelope(whole: TemplateSet, trial: Trial, given: Open): Siz
   }
   const along = Math.max(length.value, width.value)
   const corners = leastSquare({ along, across: width.value }, given.seam, ruler)
-  const choice = (what: string, value: number, unrounded: number, from: Least) => ({ piece: given.name, path: pocketPath, what, value, unrounded, limitedBy: from.limitedBy })
+  const choice = (what: string, value: number, unrounded: number, from: Least) => ({
+    piece: given.name,
+    path: pocketPath,
+    what,
+    value,
+    unrounded,
+    limitedBy: from.limitedBy,
+  })
   const exact = (along + width.value) * Math.SQRT1_2 + (given.seam.bottom + given.seam.top) / 2
   return {
     given: cornersGiven(given, corners),
     chosen: [
       choice('square', corners.square, exact, length),
       choice('side corners', corners.sides, corners.square - along * Math.SQRT1_2, length),
-      { ...choice('bottom corner', corners.bottom, corners.square + given.seam.bottom - corners.sides, width), limitedBy: `bottom seam: at least ${String(given.seam.bottom)} mm` },
-      { ...choice('flap corner', corners.flap, corners.square + given.seam.top - corners.sides, width), limitedBy: `top seam: at least ${String(given.seam.top)} mm` },
+      {
+        ...choice('bottom corner', corners.bottom, corners.square + given.seam.bottom - corners.sides, width),
+        limitedBy: `bottom seam: at least ${String(given.seam.bottom)} mm`,
+      },
+      {
+        ...choice('flap corner', corners.flap, corners.square + given.seam.top - corners.sides, width),
+        limitedBy: `top seam: at least ${String(given.seam.top)} mm`,
+      },
     ],
   }
 }

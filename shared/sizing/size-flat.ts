@@ -17,21 +17,37 @@ interface Trial {
 
 const axisOf = (trial: Trial, piece: PieceGiven, fit: Fit, axis: string) => {
   const set = { ...trial.set, pieces: new Map([...trial.set.pieces, [piece.name, piece]]) }
-  return judgeFit(modelSet(set, trial.options), { ...fit, turn: fit.turn ?? 'none' }).axes.find((candidate) => candidate.clearance.axis === axis)
+  return judgeFit(modelSet(set, trial.options), { ...fit, turn: fit.turn ?? 'none' }).axes.find(
+    (candidate) => candidate.clearance.axis === axis,
+  )
 }
 
 /** The largest insert or divider that still goes into what holds it, on the cutting grid. */
 export function sizeInsert(whole: TemplateSet, trial: Trial, given: InsertGiven): SizedPiece<InsertGiven> | Unsizable {
   const { ruler, target } = whole.tokens
-  const fit = trial.set.fits.find((candidate) => candidate.relation === 'in' && candidate.put.some((entry) => entry.piece === given.name))
+  const fit = trial.set.fits.find(
+    (candidate) => candidate.relation === 'in' && candidate.put.some((entry) => entry.piece === given.name),
+  )
   const holder = fit === undefined ? undefined : modelSet(trial.set, trial.options).folded(fit.to).cavity
   if (fit === undefined || holder == null) {
-    return { requirement: `size of ${given.name}`, message: `${given.name} goes into nothing that has a size`, nearest: `give its size, or a fit that puts it in something` }
+    return {
+      requirement: `size of ${given.name}`,
+      message: `${given.name} goes into nothing that has a size`,
+      nearest: `give its size, or a fit that puts it in something`,
+    }
   }
   const isDivider = given.kind === 'divider'
-  const largest = { length: isDivider ? holder.width.nominal : holder.length.nominal, width: isDivider ? (holder.depth?.nominal ?? 20) : holder.width.nominal }
+  const largest = {
+    length: isDivider ? holder.width.nominal : holder.length.nominal,
+    width: isDivider ? (holder.depth?.nominal ?? 20) : holder.width.nominal,
+  }
   const sized = (length: number, width: number): InsertGiven => ({ ...given, size: { length, width } })
-  const find = (side: 'length' | 'width', axis: string, start: number, of: (value: number) => InsertGiven): ChosenSize | null => {
+  const find = (
+    side: 'length' | 'width',
+    axis: string,
+    start: number,
+    of: (value: number) => InsertGiven,
+  ): ChosenSize | null => {
     let value = ceilToGrid(start, ruler.cut)
     for (let step = 0; step < 4000 && value > ruler.cut; step += 1) {
       const judged = axisOf(trial, of(value), fit, axis)
@@ -39,7 +55,14 @@ export function sizeInsert(whole: TemplateSet, trial: Trial, given: InsertGiven)
       if (keepsLeast(judged.clearance.clearance, judged.clearance.requirement.band, target)) {
         const least = judged.clearance.requirement.band.min ?? 0
         const spare = distributionOf(judged.clearance.clearance).quantile(1 - target) - least
-        return { piece: given.name, path: ['pieces', given.name, 'size'], what: side, value, unrounded: value + spare, limitedBy: requirementInWords(fit.id, judged) }
+        return {
+          piece: given.name,
+          path: ['pieces', given.name, 'size'],
+          what: side,
+          value,
+          unrounded: value + spare,
+          limitedBy: requirementInWords(fit.id, judged),
+        }
       }
       value = floorToGrid(value - ruler.cut, ruler.cut)
     }
@@ -48,10 +71,21 @@ export function sizeInsert(whole: TemplateSet, trial: Trial, given: InsertGiven)
   const spans = isDivider ? 'width' : 'length'
   const length = find('length', spans, largest.length, (value) => sized(value, Math.min(value, largest.width)))
   const height: ChosenSize | null = isDivider
-    ? { piece: given.name, path: ['pieces', given.name, 'size'], what: 'height', value: floorToGrid(largest.width - 1, ruler.cut), unrounded: largest.width - 1, limitedBy: `stands a millimetre below the rim of ${fit.to}` }
+    ? {
+        piece: given.name,
+        path: ['pieces', given.name, 'size'],
+        what: 'height',
+        value: floorToGrid(largest.width - 1, ruler.cut),
+        unrounded: largest.width - 1,
+        limitedBy: `stands a millimetre below the rim of ${fit.to}`,
+      }
     : find('width', 'width', largest.width, (value) => sized(Math.max(value, length?.value ?? value), value))
   if (length === null || height === null) {
-    return { requirement: `${fit.id}`, message: `no size of ${given.name} on the ruler goes into ${fit.to}`, nearest: 'use a finer ruler or a smaller clearance' }
+    return {
+      requirement: `${fit.id}`,
+      message: `no size of ${given.name} on the ruler goes into ${fit.to}`,
+      nearest: 'use a finer ruler or a smaller clearance',
+    }
   }
   return { given: sized(length.value, height.value), chosen: [length, height] }
 }
@@ -62,25 +96,41 @@ export function sizeBag(whole: TemplateSet, trial: Trial, given: BagGiven): Size
   const fits = trial.set.fits.filter((fit) => fit.relation === 'in' && fit.to === given.name)
   const first = fits[0]
   if (first === undefined) {
-    return { requirement: `inside of ${given.name}`, message: `nothing goes into ${given.name}`, nearest: `give its inside, or a fit that puts something in ${given.name}` }
+    return {
+      requirement: `inside of ${given.name}`,
+      message: `nothing goes into ${given.name}`,
+      nearest: `give its inside, or a fit that puts something in ${given.name}`,
+    }
   }
-  const sized = (width: number, depth: number, height: number): BagGiven => ({ ...given, inside: { width, depth, height } })
+  const sized = (width: number, depth: number, height: number): BagGiven => ({
+    ...given,
+    inside: { width, depth, height },
+  })
   const roomy = 600
   const boundsOf = (axis: 'width' | 'depth'): readonly Bound[] =>
     fits.map((fit) => {
       const at = (value: number) => {
-        const found = axisOf(trial, axis === 'width' ? sized(value, roomy, roomy) : sized(roomy, value, roomy), fit, axis)
+        const found = axisOf(
+          trial,
+          axis === 'width' ? sized(value, roomy, roomy) : sized(roomy, value, roomy),
+          fit,
+          axis,
+        )
         if (found === undefined) throw new RangeError(`${fit.id} has no ${axis}`)
         return found
       }
       return {
         requirement: requirementInWords(fit.id, at(roomy)),
-        clearanceAt: (value) => ({ clearance: at(value).clearance.clearance, band: at(value).clearance.requirement.band }),
+        clearanceAt: (value) => ({
+          clearance: at(value).clearance.clearance,
+          band: at(value).clearance.requirement.band,
+        }),
       }
     })
   const width = leastValue(boundsOf('width'), roomy, ruler.score, target)
   const depth = leastValue(boundsOf('depth'), roomy, ruler.score, target)
-  if (width === null || depth === null) return { requirement: first.id, message: `nothing limits ${given.name}`, nearest: null }
+  if (width === null || depth === null)
+    return { requirement: first.id, message: `nothing limits ${given.name}`, nearest: null }
   const load = modelSet(trial.set, trial.options).load(first)
   const stands = first.stands === 'flat' || load.stands ? load.height : load.width
   const high = (stands.nominal * 4) / 3
@@ -91,7 +141,14 @@ export function sizeBag(whole: TemplateSet, trial: Trial, given: BagGiven): Size
     chosen: [
       { piece: given.name, path, what: 'width', ...width },
       { piece: given.name, path, what: 'depth', ...depth },
-      { piece: given.name, path, what: 'height', value: height, unrounded: high, limitedBy: `a third more than what stands in it (common practice)` },
+      {
+        piece: given.name,
+        path,
+        what: 'height',
+        value: height,
+        unrounded: high,
+        limitedBy: `a third more than what stands in it (common practice)`,
+      },
     ],
   }
 }

@@ -5,7 +5,8 @@ export const assumedDensity = 0.8
 export const estimatedCaliperShare = 0.15
 
 /** Spread of a given caliper without its own tolerance: ±10 % up to 300 g/m², ±5 % above (published: a conservation board maker). */
-export const defaultCaliperShare = (grammage: number | null): number => (grammage !== null && grammage > 300 ? 0.05 : 0.1)
+export const defaultCaliperShare = (grammage: number | null): number =>
+  grammage !== null && grammage > 300 ? 0.05 : 0.1
 
 /** Caliper in millimetres estimated from g/m²: grammage ÷ density ÷ 1000. */
 export const estimateCaliper = (grammage: number): number => grammage / assumedDensity / 1000

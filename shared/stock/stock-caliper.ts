@@ -4,7 +4,11 @@ import type { Dimension } from '../uncertainty/dimension.ts'
 import { defaultCaliperShare, estimateCaliper, estimatedCaliperShare } from './caliper-estimate.ts'
 
 /** Nominal caliper, its half-width, and whether it had to be estimated from the grammage. */
-export function caliperOf(stock: Stock): { readonly nominal: number; readonly halfWidth: number; readonly isEstimated: boolean } {
+export function caliperOf(stock: Stock): {
+  readonly nominal: number
+  readonly halfWidth: number
+  readonly isEstimated: boolean
+} {
   if (stock.caliper !== null) {
     return {
       nominal: stock.caliper,

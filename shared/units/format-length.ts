@@ -37,7 +37,8 @@ export function formatLength(mm: Millimetres, unit: RulerUnit, options: FormatOp
   if (unit === 'mm') return `${decimalText(mm, options.decimals ?? 2)}${suffix}`
   const inches = mm / millimetresPerInch
   const count = Math.round(inches * finest)
-  if (Math.abs(count / finest - inches) * millimetresPerInch < sameLength) return `${mixedFraction(count, finest)}${suffix}`
+  if (Math.abs(count / finest - inches) * millimetresPerInch < sameLength)
+    return `${mixedFraction(count, finest)}${suffix}`
   return `${decimalText(inches, options.decimals ?? 3)}${suffix}`
 }
 
@@ -56,7 +57,8 @@ export function formatMark(mm: Millimetres, grid: Millimetres, unit: RulerUnit):
 
 /** `0.2..3 mm`, `0.4.. mm`, `..3 mm`. */
 export function formatRange(range: Range, unit: RulerUnit): string {
-  const end = (value: Millimetres | null): string => (value === null ? '' : formatLength(value, unit, { bare: true, decimals: 3 }))
+  const end = (value: Millimetres | null): string =>
+    value === null ? '' : formatLength(value, unit, { bare: true, decimals: 3 })
   return `${end(range.min)}..${end(range.max)} ${unit}`
 }
 

@@ -36,4 +36,4 @@ export interface Ruler {
 /** What a reader of text gives back: the value, or what is wrong and what to write instead. */
 export type Reading<T> =
   | { readonly ok: true; readonly value: T }
-  | { readonly ok: false; readonly fact: string; readonly remedy: string }
+  | { readonly ok: false; readonly code: string; readonly fact: string; readonly remedy: string }
