@@ -46,9 +46,26 @@ export type FoldedForm =
   | { readonly kind: 'card'; readonly panels: readonly Millimetres[]; readonly layers: number }
   | EnvelopeForm
   | BoxForm
-  | { readonly kind: 'sleeve'; readonly panels: readonly Millimetres[]; readonly overlap: Dimension; readonly length: Millimetres; readonly wrapped: 'width' | 'length' }
-  | { readonly kind: 'band'; readonly stripLength: Dimension; readonly wrapped: 'width' | 'length'; readonly ribbon: boolean }
-  | { readonly kind: 'bag'; readonly panels: { readonly face: Millimetres; readonly gusset: Millimetres; readonly height: Millimetres }; readonly top: Millimetres; readonly bottom: Millimetres; readonly seam: Millimetres }
+  | {
+      readonly kind: 'sleeve'
+      readonly panels: readonly Millimetres[]
+      readonly overlap: Dimension
+      readonly length: Millimetres
+      readonly wrapped: 'width' | 'length'
+    }
+  | {
+      readonly kind: 'band'
+      readonly stripLength: Dimension
+      readonly wrapped: 'width' | 'length'
+      readonly ribbon: boolean
+    }
+  | {
+      readonly kind: 'bag'
+      readonly panels: { readonly face: Millimetres; readonly gusset: Millimetres; readonly height: Millimetres }
+      readonly top: Millimetres
+      readonly bottom: Millimetres
+      readonly seam: Millimetres
+    }
   | { readonly kind: 'insert'; readonly standing: boolean }
   | { readonly kind: 'bought'; readonly body: 'solid' | 'flat' | 'box' }
   | { readonly kind: 'custom' }
@@ -68,8 +85,18 @@ export type EnvelopeForm =
       readonly pocket: { readonly length: Millimetres; readonly width: Millimetres }
       readonly square: Millimetres
       /** Distance from each corner at which its fold cuts both edges. Left and right differ only where given so. */
-      readonly corners: { readonly left: Millimetres; readonly right: Millimetres; readonly bottom: Millimetres; readonly flap: Millimetres }
-      readonly reach: { readonly left: Millimetres; readonly right: Millimetres; readonly bottom: Millimetres; readonly top: Millimetres }
+      readonly corners: {
+        readonly left: Millimetres
+        readonly right: Millimetres
+        readonly bottom: Millimetres
+        readonly flap: Millimetres
+      }
+      readonly reach: {
+        readonly left: Millimetres
+        readonly right: Millimetres
+        readonly bottom: Millimetres
+        readonly top: Millimetres
+      }
       readonly seam: { readonly bottom: Millimetres; readonly top: Millimetres }
       /** Legs of the notches, e_b and e_t of `physics` B.5. */
       readonly notch: { readonly bottom: Millimetres; readonly top: Millimetres }
@@ -93,7 +120,10 @@ export type EnvelopeForm =
 export interface BoxForm {
   readonly kind: 'box'
   readonly scored: { readonly length: Millimetres; readonly width: Millimetres }
-  readonly walls: { readonly length: readonly [Millimetres, Millimetres]; readonly width: readonly [Millimetres, Millimetres] }
+  readonly walls: {
+    readonly length: readonly [Millimetres, Millimetres]
+    readonly width: readonly [Millimetres, Millimetres]
+  }
   /** The axis whose inside loses the tabs' layers: width where tabs are at the ends. */
   readonly tabbedAxis: 'length' | 'width'
 }

@@ -10,15 +10,7 @@ import type { SleeveGiven } from './sleeve/sleeve-given.ts'
 
 /** A piece as its author gave it, every length read into millimetres, defaults of the language filled in. */
 export type PieceGiven =
-  | BagGiven
-  | BandGiven
-  | BoughtGiven
-  | BoxGiven
-  | CardGiven
-  | CustomGiven
-  | EnvelopeGiven
-  | InsertGiven
-  | SleeveGiven
+  BagGiven | BandGiven | BoughtGiven | BoxGiven | CardGiven | CustomGiven | EnvelopeGiven | InsertGiven | SleeveGiven
 
 /** The word an author writes as `kind`. A lid is a box turned over; a divider is an insert that stands. */
 export type PieceKindName = PieceGiven['kind']

@@ -24,7 +24,13 @@ export function cutSource(piece: PieceGiven, context: FoldContext, axis: string,
   return source(cutName(piece.name, axis), coefficient, context.maker.cut)
 }
 
-export function scoreSource(piece: PieceGiven, context: FoldContext, axis: string, line: number, coefficient: number): Source {
+export function scoreSource(
+  piece: PieceGiven,
+  context: FoldContext,
+  axis: string,
+  line: number,
+  coefficient: number,
+): Source {
   return source(scoreName(piece.name, axis, line), coefficient, context.maker.score)
 }
 
@@ -57,7 +63,12 @@ export function diagonalPrintSources(span: Millimetres): readonly Source[] {
 }
 
 /** Growth with humidity of a span of paper; nothing where the workspace names no range. */
-export function humiditySources(piece: PieceGiven, context: FoldContext, span: Millimetres, axis: PlaneAxis): readonly Source[] {
+export function humiditySources(
+  piece: PieceGiven,
+  context: FoldContext,
+  span: Millimetres,
+  axis: PlaneAxis,
+): readonly Source[] {
   if (context.humidityHalfRange === 0 || piece.stock === null) return []
   const grain = context.stock(piece.stock).grain
   if (grain === null) return []

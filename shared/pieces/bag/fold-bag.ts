@@ -66,7 +66,10 @@ export function foldBag(given: BagGiven, context: FoldContext): FoldedPiece {
     )
   const face = panel(1, sizes.face, first, second)
   const gusset = panel(2, sizes.gusset, second, third)
-  const tall = dimension(sizes.height, [cutSource(given, context, 'height', 1), scoreSource(given, context, 'height', 1, -1)])
+  const tall = dimension(sizes.height, [
+    cutSource(given, context, 'height', 1),
+    scoreSource(given, context, 'height', 1, -1),
+  ])
   return {
     given,
     blank: { length: Math.max(round, high), width: Math.min(round, high) },
@@ -76,10 +79,22 @@ export function foldBag(given: BagGiven, context: FoldContext): FoldedPiece {
       width: outsideRightAngles(gusset, hinge, caliper),
       height: tall,
     },
-    cavity: { shape: 'bag', length: insideRightAngles(face, hinge), width: insideRightAngles(gusset, hinge), depth: tall, open: null },
+    cavity: {
+      shape: 'bag',
+      length: insideRightAngles(face, hinge),
+      width: insideRightAngles(gusset, hinge),
+      depth: tall,
+      open: null,
+    },
     raised: null,
     isFolded: false,
-    measures: [measureOf(given.name, 'blank length', round, 'cut'), measureOf(given.name, 'blank height', high, 'cut'), first, second, third],
+    measures: [
+      measureOf(given.name, 'blank length', round, 'cut'),
+      measureOf(given.name, 'blank height', high, 'cut'),
+      first,
+      second,
+      third,
+    ],
     form: {
       kind: 'bag',
       panels: { face: sizes.face, gusset: sizes.gusset, height: sizes.height },

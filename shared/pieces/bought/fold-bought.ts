@@ -72,7 +72,13 @@ export function foldBought(given: BoughtGiven): FoldedPiece {
     cavity:
       inside === null
         ? null
-        : { shape: hasDepth ? 'tray' : 'pocket', length: inside.length, width: inside.width, depth: inside.depth, open: null },
+        : {
+            shape: hasDepth ? 'tray' : 'pocket',
+            length: inside.length,
+            width: inside.width,
+            depth: inside.depth,
+            open: null,
+          },
     raised: null,
     isFolded: !hasDepth && isContainer,
     measures: [],

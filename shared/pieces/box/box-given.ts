@@ -29,5 +29,7 @@ export interface BoxGiven extends PieceBase {
   readonly thumbNotch: boolean
   readonly covered: string | null
   /** Panels stuck on the outside of a wall or on the top. */
-  readonly layers: readonly (Pick<CardLayer, 'stock' | 'size' | 'banner'> & { readonly on: 'top' | 'length' | 'width' })[]
+  readonly layers: readonly (Pick<CardLayer, 'stock' | 'size' | 'banner'> & {
+    readonly on: 'top' | 'length' | 'width'
+  })[]
 }

@@ -48,7 +48,14 @@ function wallMeasures(given: BoxGiven, sizes: BoxSizes): readonly Wall[] {
 }
 
 /** Distance between the two opposite scores of an axis: how it varies depends on which edges they are set from. */
-function scoredDimension(given: BoxGiven, context: FoldContext, axis: PlaneAxis, sizes: BoxSizes, blank: Measure, walls: readonly Wall[]): Dimension {
+function scoredDimension(
+  given: BoxGiven,
+  context: FoldContext,
+  axis: PlaneAxis,
+  sizes: BoxSizes,
+  blank: Measure,
+  walls: readonly Wall[],
+): Dimension {
   const pair = walls.filter((wall) => wall.axis === axis)
   // A score set from its own edge moves inwards when it is set too deep; the far one set from the near edge moves outwards.
   const isFromOneEdge = given.scored === 'one-edge' && given.made === 'measured'
@@ -56,8 +63,15 @@ function scoredDimension(given: BoxGiven, context: FoldContext, axis: PlaneAxis,
   const span = (sources: readonly Source[], marks: readonly MarkEffect[]): Dimension =>
     betweenScores(given, context, axis, sizes.scored[axis], sources, marks)
   if (given.made === 'printed') return span(lines, [])
-  if (isFromOneEdge) return span(lines, pair.map((wall) => ({ measure: wall.measure, coefficient: wall.line === 1 ? -1 : 1 })))
-  const marks = mergeMarks([{ measure: blank, coefficient: 1 }, ...pair.map((wall) => ({ measure: wall.measure, coefficient: -1 }))])
+  if (isFromOneEdge)
+    return span(
+      lines,
+      pair.map((wall) => ({ measure: wall.measure, coefficient: wall.line === 1 ? -1 : 1 })),
+    )
+  const marks = mergeMarks([
+    { measure: blank, coefficient: 1 },
+    ...pair.map((wall) => ({ measure: wall.measure, coefficient: -1 })),
+  ])
   return span([cutSource(given, context, axis, 1), ...lines, fenceSource(context, -2)], marks)
 }
 
@@ -70,7 +84,13 @@ const mergeMarks = (marks: readonly MarkEffect[]): MarkEffect[] =>
   }, [])
 
 /** Distance from a wall's score to its cut edge. */
-function wallDimension(given: BoxGiven, context: FoldContext, wall: Wall, nominal: Millimetres, blank: Measure): Dimension {
+function wallDimension(
+  given: BoxGiven,
+  context: FoldContext,
+  wall: Wall,
+  nominal: Millimetres,
+  blank: Measure,
+): Dimension {
   const score = (sign: 1 | -1): Source => scoreSource(given, context, wall.axis, wall.line, sign)
   const sources: readonly Source[] =
     given.made === 'printed'
@@ -99,7 +119,10 @@ export function foldBox(given: BoxGiven, context: FoldContext): FoldedPiece {
   const hinge = hingeDepth(rightAngleHinge(context), caliper)
   const tabShare = modelDefaults.tabShare.value
   // ω: the centre moves with the caliper, the split within it is the piece's own, both ends alike.
-  const pushed = add(scale(caliper, tabShare), dimension(0, [source(`tab(${given.name})`, 1, caliper.nominal * (1 - tabShare))]))
+  const pushed = add(
+    scale(caliper, tabShare),
+    dimension(0, [source(`tab(${given.name})`, 1, caliper.nominal * (1 - tabShare))]),
+  )
   const blankMeasures = {
     length: measureOf(given.name, 'blank length', sizes.blank.length, 'cut'),
     width: measureOf(given.name, 'blank width', sizes.blank.width, 'cut'),
@@ -107,15 +130,24 @@ export function foldBox(given: BoxGiven, context: FoldContext): FoldedPiece {
   const walls = wallMeasures(given, sizes)
   const doubled = given.walls === 'doubled' ? scale(caliper, -2) : null
   const covered = given.covered === null ? null : context.caliper(given.covered)
-  const stuckOn = (axis: PlaneAxis): readonly Dimension[] => given.layers.filter((layer) => layer.on === axis).map((layer) => context.caliper(layer.stock))
+  const stuckOn = (axis: PlaneAxis): readonly Dimension[] =>
+    given.layers.filter((layer) => layer.on === axis).map((layer) => context.caliper(layer.stock))
 
   const planeSizes = (axis: PlaneAxis): { inside: Dimension; outside: Dimension } => {
     const scored = scoredDimension(given, context, axis, sizes, blankMeasures[axis], walls)
     const plainInside = insideRightAngles(scored, hinge)
     const plainOutside = outsideRightAngles(scored, hinge, caliper)
     const isTabbed = axis === tabbedAxis(given)
-    const inside = !isTabbed ? plainInside : given.tabs.glued === 'inside' ? add(plainInside, scale(caliper, -2), scale(pushed, 2)) : add(plainInside, scale(pushed, -2))
-    const outside = !isTabbed ? plainOutside : given.tabs.glued === 'inside' ? add(plainOutside, scale(pushed, 2)) : add(plainOutside, scale(caliper, 2), scale(pushed, -2))
+    const inside = !isTabbed
+      ? plainInside
+      : given.tabs.glued === 'inside'
+        ? add(plainInside, scale(caliper, -2), scale(pushed, 2))
+        : add(plainInside, scale(pushed, -2))
+    const outside = !isTabbed
+      ? plainOutside
+      : given.tabs.glued === 'inside'
+        ? add(plainOutside, scale(pushed, 2))
+        : add(plainOutside, scale(caliper, 2), scale(pushed, -2))
     return {
       inside: doubled === null ? inside : add(inside, doubled),
       outside: add(outside, ...(covered === null ? [] : [scale(covered, 2)]), ...stuckOn(axis)),
@@ -128,7 +160,8 @@ export function foldBox(given: BoxGiven, context: FoldContext): FoldedPiece {
   const shallowest = byDepth[0] ?? walls[0]
   const tallest = byDepth.at(-1) ?? walls[0]
   if (shallowest === undefined || tallest === undefined) throw new RangeError(`${given.name} has no walls`)
-  const wallOf = (wall: Wall): Dimension => wallDimension(given, context, wall, wallNominal(wall), blankMeasures[wall.axis])
+  const wallOf = (wall: Wall): Dimension =>
+    wallDimension(given, context, wall, wallNominal(wall), blankMeasures[wall.axis])
   const depth = wallDepth(wallOf(shallowest), hinge)
   const height = wallHeight(wallOf(tallest), hinge, caliper)
   const onTop = given.layers.filter((layer) => layer.on === 'top').map((layer) => context.caliper(layer.stock))
@@ -144,7 +177,11 @@ export function foldBox(given: BoxGiven, context: FoldContext): FoldedPiece {
     cavity: { shape: 'tray', length: length.inside, width: width.inside, depth, open: null },
     raised: null,
     isFolded: false,
-    measures: [blankMeasures.length, blankMeasures.width, ...new Map(walls.map((wall) => [wall.measure.id, wall.measure])).values()],
+    measures: [
+      blankMeasures.length,
+      blankMeasures.width,
+      ...new Map(walls.map((wall) => [wall.measure.id, wall.measure])).values(),
+    ],
     form: { kind: 'box', scored: sizes.scored, walls: sizes.walls, tabbedAxis: tabbedAxis(given) },
   }
 }

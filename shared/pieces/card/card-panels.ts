@@ -27,7 +27,12 @@ export const rollStep = (caliper: Millimetres): Millimetres => (Math.PI / 2) * c
  * Panels across the fold, outermost first, where the author did not give them: equal for single and accordion folds,
  * each folded-in panel of a roll a step and a fold error shorter on the score grid, a gate's two leaves half a panel.
  */
-export function cardPanels(given: CardGiven, panel: Millimetres, caliper: Millimetres, scoreGrid: Millimetres): readonly Millimetres[] {
+export function cardPanels(
+  given: CardGiven,
+  panel: Millimetres,
+  caliper: Millimetres,
+  scoreGrid: Millimetres,
+): readonly Millimetres[] {
   if (given.fold === 'none') return [panel]
   if (given.panelWidths !== null) return given.panelWidths
   const count = given.style === 'gate' ? 3 : given.panels

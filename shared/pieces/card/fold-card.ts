@@ -4,7 +4,16 @@ import type { Millimetres } from '../../units/units.ts'
 import type { FoldContext } from '../fold-context.ts'
 import type { Cavity, FoldedPiece, Measure } from '../folded-piece.ts'
 import { closedPanel } from '../folds.ts'
-import { betweenScores, cutExtent, cutSource, flatHinge, hingeDepth, measureOf, scoreSource, type PlaneAxis } from '../making.ts'
+import {
+  betweenScores,
+  cutExtent,
+  cutSource,
+  flatHinge,
+  hingeDepth,
+  measureOf,
+  scoreSource,
+  type PlaneAxis,
+} from '../making.ts'
 import { modelDefaults } from '../model-defaults.ts'
 import type { CardGiven } from './card-given.ts'
 import { cardPanels, foldedLayers, foldedSize, panelsOfBlank, type FoldedSize } from './card-panels.ts'
@@ -13,7 +22,9 @@ const sum = (values: readonly number[]): number => values.reduce((total, value) 
 
 /** How far glued layers reach past the card's edge along an axis, both sides together. */
 function overhang(given: CardGiven, axis: PlaneAxis, size: Millimetres): Millimetres {
-  const reach = given.layers.map((layer) => 2 * Math.abs(axis === 'length' ? layer.at.x : layer.at.y) + layer.size[axis])
+  const reach = given.layers.map(
+    (layer) => 2 * Math.abs(axis === 'length' ? layer.at.x : layer.at.y) + layer.size[axis],
+  )
   return Math.max(0, ...reach.map((extent) => extent - size))
 }
 
@@ -26,7 +37,12 @@ function thicknessOf(given: CardGiven, caliper: Dimension, context: FoldContext)
   )
 }
 
-function pocketOf(given: CardGiven, size: FoldedSize, closed: { length: Dimension; width: Dimension }, hinge: Dimension): Cavity | null {
+function pocketOf(
+  given: CardGiven,
+  size: FoldedSize,
+  closed: { length: Dimension; width: Dimension },
+  hinge: Dimension,
+): Cavity | null {
   if (given.pocket === null) return null
   // The pocket is folded up from the bottom edge, which is the edge across the main fold; its mouth is parallel to it.
   const mouth: PlaneAxis = size.across ?? 'width'
@@ -49,7 +65,9 @@ export function foldCard(given: CardGiven, context: FoldContext): FoldedPiece {
     return made
   }
   const flat = (axis: PlaneAxis): Dimension =>
-    cutExtent(given, context, axis, size[axis], [{ measure: measure(`blank ${axis}`, size[axis], 'cut'), coefficient: 1 }])
+    cutExtent(given, context, axis, size[axis], [
+      { measure: measure(`blank ${axis}`, size[axis], 'cut'), coefficient: 1 },
+    ])
 
   const across = size.across
   let panels: readonly Millimetres[] = [across === null ? size.width : size[across]]
@@ -76,7 +94,10 @@ export function foldCard(given: CardGiven, context: FoldContext): FoldedPiece {
       context,
       across,
       widest,
-      [cutSource(given, context, across, given.made === 'printed' ? 0.5 : 1 / panels.length), scoreSource(given, context, across, 1, 1)],
+      [
+        cutSource(given, context, across, given.made === 'printed' ? 0.5 : 1 / panels.length),
+        scoreSource(given, context, across, 1, 1),
+      ],
       [
         { measure: blankAcross, coefficient: 1 },
         { measure: foldMark, coefficient: 1 },
@@ -94,7 +115,11 @@ export function foldCard(given: CardGiven, context: FoldContext): FoldedPiece {
     width: shift(width, overhang(given, 'width', size.width)),
   }
   const pocket = given.pocket
-  if (pocket !== null) blank = size.across === 'length' ? { ...blank, width: blank.width + pocket.depth } : { ...blank, length: blank.length + pocket.depth }
+  if (pocket !== null)
+    blank =
+      size.across === 'length'
+        ? { ...blank, width: blank.width + pocket.depth }
+        : { ...blank, length: blank.length + pocket.depth }
   return {
     given,
     blank,

@@ -36,7 +36,8 @@ export function foldCustom(given: CustomGiven, context: FoldContext): FoldedPiec
     outside: {
       length: declared(given, context, 'length', Math.max(...sides)),
       width: declared(given, context, 'width', Math.min(...sides)),
-      height: size.height === null ? caliper : add(dimension(size.height, [scoreSource(given, context, 'height', 1, 1)])),
+      height:
+        size.height === null ? caliper : add(dimension(size.height, [scoreSource(given, context, 'height', 1, 1)])),
     },
     cavity:
       given.inside === null

@@ -1,6 +1,15 @@
 import type { FoldContext } from '../fold-context.ts'
 import type { EnvelopeForm, FoldedPiece, Measure } from '../folded-piece.ts'
-import { betweenScores, cutSource, diagonalPrintSources, humiditySources, measureOf, scoreSource, type MarkEffect, type PlaneAxis } from '../making.ts'
+import {
+  betweenScores,
+  cutSource,
+  diagonalPrintSources,
+  humiditySources,
+  measureOf,
+  scoreSource,
+  type MarkEffect,
+  type PlaneAxis,
+} from '../making.ts'
 import { dimension } from '../../uncertainty/arithmetic.ts'
 import type { Dimension } from '../../uncertainty/dimension.ts'
 import type { Millimetres } from '../../units/units.ts'
@@ -10,7 +19,12 @@ import { envelopePiece } from './envelope-piece.ts'
 import type { BaronialByCorners, BaronialByPocket } from './envelope-given.ts'
 
 /** Marks of the two corners folded towards each other: one measure where both are set alike. */
-function cornerMarks(piece: string, names: readonly [string, string, string], corners: readonly [Millimetres, Millimetres], measures: Measure[]): MarkEffect[] {
+function cornerMarks(
+  piece: string,
+  names: readonly [string, string, string],
+  corners: readonly [Millimetres, Millimetres],
+  measures: Measure[],
+): MarkEffect[] {
   // The pocket runs √2·S less 1/√2 of each corner's distance: physics B.5 (derived).
   const perCorner = -Math.SQRT1_2
   if (Math.abs(corners[0] - corners[1]) < 1e-9) {
@@ -29,25 +43,43 @@ export function foldBaronial(given: BaronialByPocket | BaronialByCorners, contex
   const shape =
     given.by === 'corners'
       ? baronialFromCorners(given.square, given.corners)
-      : baronialFromPocket(given.pocket === 'fit' ? { along: 0, across: 0 } : { along: given.pocket.length, across: given.pocket.width }, given.seam)
+      : baronialFromPocket(
+          given.pocket === 'fit' ? { along: 0, across: 0 } : { along: given.pocket.length, across: given.pocket.width },
+          given.seam,
+        )
   const throatAlong: PlaneAxis = shape.along >= shape.across ? 'length' : 'width'
   const square = measureOf(given.name, 'square', shape.square, 'cut')
   const measures: Measure[] = [square]
-  const sides = cornerMarks(given.name, ['left corner', 'right corner', 'side corners'], [shape.corners.left, shape.corners.right], measures)
-  const ends = cornerMarks(given.name, ['bottom corner', 'flap corner', 'bottom and flap corners'], [shape.corners.bottom, shape.corners.flap], measures)
+  const sides = cornerMarks(
+    given.name,
+    ['left corner', 'right corner', 'side corners'],
+    [shape.corners.left, shape.corners.right],
+    measures,
+  )
+  const ends = cornerMarks(
+    given.name,
+    ['bottom corner', 'flap corner', 'bottom and flap corners'],
+    [shape.corners.bottom, shape.corners.flap],
+    measures,
+  )
 
   const span = (axis: PlaneAxis, nominal: Millimetres, marks: readonly MarkEffect[]): Dimension => {
-    const making = [
-      scoreSource(given, context, axis, 1, 1),
-      scoreSource(given, context, axis, 2, 1),
-    ]
+    const making = [scoreSource(given, context, axis, 1, 1), scoreSource(given, context, axis, 2, 1)]
     if (given.made === 'printed') {
-      return dimension(nominal * context.scale, [...making, ...diagonalPrintSources(nominal), ...humiditySources(given, context, nominal, axis)])
+      return dimension(nominal * context.scale, [
+        ...making,
+        ...diagonalPrintSources(nominal),
+        ...humiditySources(given, context, nominal, axis),
+      ])
     }
-    return betweenScores(given, context, axis, nominal, [...making, cutSource(given, context, axis, Math.SQRT1_2)], [
-      { measure: square, coefficient: Math.SQRT2 },
-      ...marks,
-    ])
+    return betweenScores(
+      given,
+      context,
+      axis,
+      nominal,
+      [...making, cutSource(given, context, axis, Math.SQRT1_2)],
+      [{ measure: square, coefficient: Math.SQRT2 }, ...marks],
+    )
   }
   const across: PlaneAxis = throatAlong === 'length' ? 'width' : 'length'
   const along = span(throatAlong, shape.along, sides)

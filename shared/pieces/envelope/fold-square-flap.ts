@@ -44,12 +44,23 @@ export function foldSquareFlap(given: SquareFlapGiven, context: FoldContext): Fo
     measureOf(given.name, 'back', sizes.back, 'score'),
     measureOf(given.name, 'flap', sizes.flap, 'score'),
   ] as const
-  const mark = (index: 0 | 1 | 2 | 3 | 4, coefficient: number): MarkEffect => ({ measure: measures[index], coefficient })
+  const mark = (index: 0 | 1 | 2 | 3 | 4, coefficient: number): MarkEffect => ({
+    measure: measures[index],
+    coefficient,
+  })
   const span = (axis: PlaneAxis, nominal: Millimetres, marks: readonly MarkEffect[]): Dimension =>
-    betweenScores(given, context, axis, nominal, [scoreSource(given, context, axis, 1, 1), scoreSource(given, context, axis, 2, 1)], marks)
+    betweenScores(
+      given,
+      context,
+      axis,
+      nominal,
+      [scoreSource(given, context, axis, 1, 1), scoreSource(given, context, axis, 2, 1)],
+      marks,
+    )
   const alongSpan = span(throatAlong, sizes.along, [mark(0, 1), mark(1, -2)])
   const acrossSpan = span(across, sizes.across, [mark(2, 1), mark(3, -1), mark(4, -1)])
-  const pocket = throatAlong === 'length' ? { length: alongSpan, width: acrossSpan } : { length: acrossSpan, width: alongSpan }
+  const pocket =
+    throatAlong === 'length' ? { length: alongSpan, width: acrossSpan } : { length: acrossSpan, width: alongSpan }
   const folded = foldedSquareFlaps(sizes)
   return envelopePiece(
     given,

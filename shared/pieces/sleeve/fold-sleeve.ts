@@ -35,7 +35,11 @@ function sleeveSizes(given: SleeveGiven, context: FoldContext, caliper: Millimet
   const wide = ceilTo(across + fold, context.ruler.score)
   // The lap lies inside the gap of the height: physics E (derived).
   const high = ceilTo(around.height.nominal + fold + caliper, context.ruler.score)
-  return { panels: [wide, high, wide, high], overlap: given.overlap, along: given.width ?? ceilTo(tube, context.ruler.cut) }
+  return {
+    panels: [wide, high, wide, high],
+    overlap: given.overlap,
+    along: given.width ?? ceilTo(tube, context.ruler.cut),
+  }
 }
 
 /** An open tube with square corners: inside s − 2λt, the height less the lap. */
@@ -45,8 +49,12 @@ export function foldSleeve(given: SleeveGiven, context: FoldContext): FoldedPiec
   const hinge = hingeDepth(rightAngleHinge(context), caliper)
   const [wide, high] = sizes.panels
   const total = sizes.panels.reduce((sum, panel) => sum + panel, 0) + sizes.overlap
-  const positions = sizes.panels.map((_, index) => sizes.panels.slice(0, index + 1).reduce((sum, panel) => sum + panel, 0))
-  const scores = positions.map((position, index) => measureOf(given.name, `score ${String(index + 1)}`, position, 'score'))
+  const positions = sizes.panels.map((_, index) =>
+    sizes.panels.slice(0, index + 1).reduce((sum, panel) => sum + panel, 0),
+  )
+  const scores = positions.map((position, index) =>
+    measureOf(given.name, `score ${String(index + 1)}`, position, 'score'),
+  )
   const length = measureOf(given.name, 'blank length', total, 'cut')
   const along = measureOf(given.name, 'width along the tube', sizes.along, 'cut')
   const panel = (from: 0 | 1, nominal: Millimetres): Dimension => {
@@ -58,10 +66,12 @@ export function foldSleeve(given: SleeveGiven, context: FoldContext): FoldedPiec
       'length',
       nominal,
       [scoreSource(given, context, 'girth', from + 1, -1), scoreSource(given, context, 'girth', from + 2, 1)],
-      near === undefined || far === undefined ? [] : [
-        { measure: near, coefficient: -1 },
-        { measure: far, coefficient: 1 },
-      ],
+      near === undefined || far === undefined
+        ? []
+        : [
+            { measure: near, coefficient: -1 },
+            { measure: far, coefficient: 1 },
+          ],
     )
   }
   // The panel from the first score to the second runs along the height, the next across the girth.
@@ -93,7 +103,10 @@ export function foldSleeve(given: SleeveGiven, context: FoldContext): FoldedPiec
     form: {
       kind: 'sleeve',
       panels: [wide, ...sizes.panels.slice(1)],
-      overlap: dimension(sizes.overlap, [cutSource(given, context, 'length', 1), scoreSource(given, context, 'girth', 4, -1)]),
+      overlap: dimension(sizes.overlap, [
+        cutSource(given, context, 'length', 1),
+        scoreSource(given, context, 'girth', 4, -1),
+      ]),
       length: sizes.along,
       wrapped: given.girth,
     },
