@@ -90,7 +90,7 @@ export interface Verdict {
     readonly actual: number
     readonly limit: number
     readonly sense: 'at-least' | 'at-most' | 'equal'
-    readonly unit: 'share' | 'mm' | 'count' | 'g' | 'gsm' | 'g/cm3' | 'ratio' | 'days'
+    readonly unit: 'share' | 'mm' | 'mm2' | 'count' | 'g' | 'gsm' | 'g/cm3' | 'ratio' | 'days' | 's'
   } | null
   readonly message: string
   readonly at: Place

@@ -1,0 +1,165 @@
+import type { Command } from 'commander'
+import { resolve } from 'node:path'
+import type { CheckOptions } from '../../shared/check-options.ts'
+import { checkTemplate } from '../../shared/check-template.ts'
+import type { Report } from '../../shared/report/report.ts'
+import type { RulerUnit } from '../../shared/units/units.ts'
+import { progressOf } from '../context/progress.ts'
+import { exitCode, worstExit, type ExitCode } from '../exit-code.ts'
+import { findSets, type SetInput } from '../inputs/find-sets.ts'
+import { writeWhole } from '../inputs/write-file.ts'
+import { UsageError, type Io } from '../io.ts'
+import { parseReporter, reporterNames, type ReporterRequest } from '../reporters/reporter-registry.ts'
+import type { Presentation } from '../reporters/reporter.ts'
+import type { CommandModule } from './command-module.ts'
+
+export interface JudgingOptions {
+  readonly workmanship?: string
+  readonly paper?: string
+  readonly scale?: string
+  readonly asOf?: string
+}
+
+interface Options extends JudgingOptions {
+  readonly report: readonly string[]
+  readonly single?: boolean
+  readonly failOn: string
+  readonly units?: string
+  readonly fixes?: boolean
+  readonly scales?: boolean
+}
+
+const collect = (value: string, before: readonly string[]): readonly string[] => [...before, value]
+
+/** `97%`, `97 %` or `0.97`: a print scale between a half and double. */
+export function parseScale(text: string): number {
+  const match = /^(\d+(?:\.\d+)?)\s*(%)?$/.exec(text.trim())
+  const value = match === null ? Number.NaN : Number(match[1]) / (match[2] === undefined ? 1 : 100)
+  if (!(value >= 0.5 && value <= 2))
+    throw new UsageError(`“${text}” is not a print scale`, 'Write it such as --scale 97%, between 50% and 200%.')
+  return value
+}
+
+/** A real calendar day. */
+export function parseDay(text: string): string {
+  const match = /^(\d{4})-(\d{2})-(\d{2})$/.exec(text)
+  const date = match === null ? null : new Date(`${text}T00:00:00Z`)
+  if (date === null || Number.isNaN(date.getTime()) || date.toISOString().slice(0, 10) !== text) {
+    throw new UsageError(`“${text}” is not a date`, 'Write it such as --as-of 2026-12-01.')
+  }
+  return text
+}
+
+export function oneOf<T extends string>(option: string, text: string, allowed: readonly T[]): T {
+  const found = allowed.find((candidate) => candidate === text)
+  if (found === undefined) throw new UsageError(`${option} cannot be “${text}”`, `It is one of ${allowed.join(', ')}.`)
+  return found
+}
+
+/** Options that say how a set is judged, shared by every command that judges. */
+export function addJudgingOptions(command: Command): Command {
+  return command
+    .option('--workmanship <name>', 'judge for these makers: home, studio, die, or your own')
+    .option('--paper <stock>', 'judge as if every piece were cut from this stock')
+    .option('--scale <percent>', 'judge printed pieces at this print scale, such as 97%')
+    .option('--as-of <date>', 'judge waivers as of this day (default: today)')
+}
+
+/** The engine's options for a file, from the words on the command line. */
+export function judgingOptions(io: Io, options: JudgingOptions): Omit<CheckOptions, 'file'> {
+  return {
+    asOf: options.asOf === undefined ? io.today() : parseDay(options.asOf),
+    ...(options.workmanship === undefined ? {} : { workmanship: options.workmanship }),
+    ...(options.paper === undefined ? {} : { paper: options.paper }),
+    ...(options.scale === undefined ? {} : { scale: parseScale(options.scale) }),
+  }
+}
+
+/** Exit code that reports call for. An invalid set is unusable, a crashed rule a defect. */
+export function exitOf(reports: readonly Report[], failOn: 'fail' | 'warn'): ExitCode {
+  return worstExit(
+    reports.map((report) => {
+      if (report.summary.crashed > 0) return exitCode.defect
+      if (report.summary.verdict === 'invalid') return exitCode.unusable
+      if (report.summary.fail > 0) return exitCode.failed
+      return failOn === 'warn' && report.summary.warn > 0 ? exitCode.failed : exitCode.clean
+    }),
+  )
+}
+
+/** Judges inputs in order, with progress on a terminal where there are many. */
+export function judgeInputs(
+  io: Io,
+  inputs: readonly SetInput[],
+  options: Omit<CheckOptions, 'file'>,
+): readonly Report[] {
+  const progress = progressOf(io, inputs.length)
+  const reports = inputs.map((input, index) => {
+    progress.step(index, input.file)
+    return checkTemplate(input.text, input.found.workspace, { ...options, file: input.file })
+  })
+  progress.done()
+  return reports
+}
+
+function present(
+  io: Io,
+  request: ReporterRequest,
+  reports: readonly Report[],
+  presentation: Presentation,
+): Promise<void> {
+  return request.load().then((reporter) => {
+    const text = reporter(reports, presentation)
+    if (request.file === null) io.out(text)
+    else writeWhole(resolve(io.cwd, request.file), text)
+  })
+}
+
+export function presentationOf(io: Io, units: RulerUnit | null, isSingle: boolean): Presentation {
+  return {
+    units,
+    isSingle,
+    columns: io.terminal.columns ?? 80,
+    hasColour: io.terminal.isTerminal && !io.env['NO_COLOR'] && io.env['TERM'] !== 'dumb',
+  }
+}
+
+export const checkCommand: CommandModule = {
+  define(command) {
+    command
+      .argument('[paths...]', 'sets, folders, patterns, or - for standard input')
+      .option('--report <kind>', `${reporterNames.join(', ')}; =FILE writes it there; may be repeated`, collect, [])
+      .option('--single', 'with json: one object instead of an array')
+      .option('--fail-on <what>', 'what makes the exit code 1: fail, warn', 'fail')
+      .option('--units <unit>', 'lengths in mm or in (default: the units of each set)')
+      .option('--fixes', 'work out the smallest change that passes (text always does)')
+      .option('--scales', 'work out the print scales at which each fit holds')
+    addJudgingOptions(command)
+  },
+
+  async execute(io, words, given) {
+    const options = given as unknown as Options
+    const requests = (options.report.length === 0 ? ['text'] : options.report).map(parseReporter)
+    const failOn = oneOf('--fail-on', options.failOn, ['fail', 'warn'])
+    const units = options.units === undefined ? null : oneOf('--units', options.units, ['mm', 'in'])
+    if (requests.filter((request) => request.file === null).length > 1) {
+      throw new UsageError(
+        'two reports cannot share standard output',
+        'Send all but one to files, such as --report junit=results.xml.',
+      )
+    }
+    const judging = judgingOptions(io, options)
+    const inputs = await findSets(words, io)
+    if (options.single === true && inputs.length !== 1)
+      throw new UsageError(`--single is for one set; ${String(inputs.length)} are named`)
+    const isText = requests.some((request) => request.name === 'text')
+    const reports = judgeInputs(io, inputs, {
+      ...judging,
+      fixes: isText || options.fixes === true,
+      scales: isText || options.scales === true,
+    })
+    const presentation = presentationOf(io, units, options.single === true)
+    for (const request of requests) await present(io, request, reports, presentation)
+    return exitOf(reports, failOn)
+  },
+}

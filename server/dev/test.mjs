@@ -1,0 +1,32 @@
+// npm test: installs what is missing, builds, type-checks and runs every test.
+import { spawnSync } from 'node:child_process'
+import { mkdirSync } from 'node:fs'
+import { join } from 'node:path'
+import { buildCommandLine } from './build.mjs'
+import { installNodePackages } from './node-packages.mjs'
+import { requireNode, root, runStep } from './steps.mjs'
+
+requireNode()
+installNodePackages()
+buildCommandLine()
+runStep('Checking types', process.execPath, ['node_modules/typescript/bin/tsc', '-p', 'tsconfig.json'])
+runStep('Checking that shared code runs anywhere', process.execPath, [
+  'node_modules/typescript/bin/tsc',
+  '-p',
+  'shared/tsconfig.json',
+])
+
+mkdirSync(join(root, '.data'), { recursive: true })
+const tests = spawnSync(
+  process.execPath,
+  [
+    'node_modules/vitest/vitest.mjs',
+    'run',
+    '--reporter=default',
+    '--reporter=json',
+    '--outputFile.json=.data/test-results.json',
+    ...process.argv.slice(2),
+  ],
+  { cwd: root, stdio: ['ignore', 'inherit', 'inherit'], env: { ...process.env, NODE_ENV: 'test' } },
+)
+process.exitCode = tests.status ?? 1
