@@ -13,7 +13,10 @@ function statusUnder(finding: Finding, level: Exclude<RuleLevel, 'off'>): Status
 
 /** Whether a waiver speaks of a verdict: its rule, and its subject, the fit of that axis, or the whole set. */
 export function waives(waiver: Waiver, rule: string, subject: string): boolean {
-  return waiver.rule === rule && (waiver.subject === null || waiver.subject === subject || subject.startsWith(`${waiver.subject}:`))
+  return (
+    waiver.rule === rule &&
+    (waiver.subject === null || waiver.subject === subject || subject.startsWith(`${waiver.subject}:`))
+  )
 }
 
 /** A waiver holds through its last day. */
@@ -23,7 +26,9 @@ function verdictOf(judged: JudgedSet, rule: Rule, level: Exclude<RuleLevel, 'off
   const status = statusUnder(finding, level)
   const waiver =
     status === 'warn' || status === 'fail'
-      ? judged.set.waivers.find((candidate) => waives(candidate, rule.id, finding.subject) && isInForce(candidate, judged.options.asOf))
+      ? judged.set.waivers.find(
+          (candidate) => waives(candidate, rule.id, finding.subject) && isInForce(candidate, judged.options.asOf),
+        )
       : undefined
   return {
     rule: rule.id,

@@ -1,16 +1,31 @@
 import type { JudgedFit } from '../assembly/judge-fit.ts'
 import type { JudgedSet } from '../assembly/judge-set.ts'
 import type { AxisName } from '../report/report.ts'
-import { formatLength } from '../units/format-length.ts'
+import { formatLength, formatSize } from '../units/format-length.ts'
 
 /** A length in the units of the set, with decimals enough to tell numbers apart. */
 export const inSetUnits = (judged: JudgedSet, mm: number): string => formatLength(mm, judged.set.tokens.units)
 
+/** A size in the units of the set: `200 x 158 mm`. */
+export const sizeInSetUnits = (judged: JudgedSet, sizes: readonly number[]): string =>
+  formatSize(sizes, judged.set.tokens.units)
+
+/** Things in a sentence: `a`, `a and b`, `a, b and c`; beyond `most` only how many more there are. */
+export function listInWords(things: readonly string[], most = things.length): string {
+  const shown = things.length > most ? things.slice(0, most) : things
+  const rest = things.length - shown.length
+  const all = rest > 0 ? [...shown, `${String(rest)} more`] : shown
+  const last = all.at(-1) ?? ''
+  return all.length < 2 ? last : `${all.slice(0, -1).join(', ')} and ${last}`
+}
+
 /** What is put, in the author's nouns: `lid`, `6 envelope with card`, `4 card and 4 envelope`. */
 export function putInWords(judged: JudgedFit): string {
   const { fit } = judged
-  const parts = fit.put.map(({ count, piece }) => (count * fit.count > 1 || fit.isStack ? `${String(count * fit.count)} ${piece}` : piece))
-  const stack = parts.join(' and ')
+  const parts = fit.put.map(({ count, piece }) =>
+    count * fit.count > 1 || fit.isStack ? `${String(count * fit.count)} ${piece}` : piece,
+  )
+  const stack = listInWords(parts)
   return fit.holding === null ? stack : `${stack} with ${fit.holding}`
 }
 
@@ -37,6 +52,15 @@ export function outOfHundred(share: number): string {
   if (builds < 0.95) return 'fewer than 1'
   if (builds > 99 && builds < 99.995) return 'more than 99'
   return String(Math.round(builds))
+}
+
+/** A share as people say it: half-widths are guesses, so nothing finer than a few builds in twenty, fifty or a hundred. */
+export function aboutInWords(share: number): string {
+  if (share >= 0.9975) return 'nearly all'
+  if (share <= 0.0025) return 'hardly any'
+  const among = share > 0.97 || share < 0.03 ? 100 : share > 0.9 || share < 0.1 ? 20 : 10
+  const builds = Math.min(among - 1, Math.max(1, Math.round(share * among)))
+  return `about ${String(builds)} in ${String(among)}`
 }
 
 /** `home-made`, `studio-made`: whose hands a share speaks of. */

@@ -1,6 +1,7 @@
 import { formatNumber } from '../edition.ts'
 import type { Path, ReportProblem } from '../pieces/reading/report-problem.ts'
 import { createValueReader, type ValueReader } from '../pieces/reading/value-reader.ts'
+import { builtInSize } from '../stock/built-in-sizes.ts'
 import { sheetByName } from '../stock/sheets.ts'
 import { checkContainment } from './check-containment.ts'
 import { completeWraps } from './complete-wraps.ts'
@@ -16,9 +17,9 @@ import { readWaivers } from './read-waivers.ts'
 import { checkFormat, reportIn } from './read-workspace.ts'
 import { readYaml, type SourceTree } from './read-yaml.ts'
 import { setGroups, setKeys } from './set-shape.ts'
-import type { SetReading, Tokens, Workspace } from './template-model.ts'
+import type { NamedSize, SetReading, Tokens, Workspace } from './template-model.ts'
 
-const groups = [...Object.keys(setGroups), 'pieces', 'waivers']
+const groups = ['pieces', ...Object.keys(setGroups), 'waivers']
 
 /** Keys that only a workspace has: their place is said, where "unknown" would puzzle. */
 const workspaceOnly = ['sets', 'families']
@@ -62,6 +63,17 @@ function requireKeys(tree: SourceTree, workspace: Workspace, report: ReportProbl
 function usualSheet(tokens: Tokens): Sheet {
   const name = tokens.units === 'mm' ? 'a4' : 'letter'
   return { ...(sheetByName(name) ?? { length: NaN, width: NaN }), name }
+}
+
+/** Sizes a family keeps to; those built in need no entry under `sizes`. */
+function familySizesOf(family: string | undefined, workspace: Workspace): ReadonlyMap<string, NamedSize> {
+  const names = family === undefined ? [] : (workspace.families.get(family)?.sizes ?? [])
+  return new Map(
+    names.flatMap((name) => {
+      const size = workspace.tokens.sizes.get(name) ?? builtInSize(name)
+      return size === null ? [] : [[name, size] as const]
+    }),
+  )
 }
 
 function checkFamily(
@@ -126,6 +138,7 @@ export function readSet(
       name,
       title: frame.title ?? name,
       family: frame.family ?? null,
+      familySizes: familySizesOf(frame.family, workspace),
       sheet,
       mail: frame.mail ?? null,
       tokens,

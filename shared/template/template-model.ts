@@ -135,6 +135,8 @@ export interface TemplateSet {
   readonly name: string
   readonly title: string
   readonly family: string | null
+  /** Sizes its family keeps to, by name; empty where it names none. */
+  readonly familySizes: ReadonlyMap<string, NamedSize>
   /** What blanks are cut from. */
   readonly sheet: { readonly length: Millimetres; readonly width: Millimetres; readonly name: string }
   readonly mail: string | null
