@@ -34,8 +34,10 @@ export interface Rule {
 /** A whole set as an example, with what the rule must say of it. */
 export interface RuleExample {
   readonly title: string
-  /** `foldgauge.yaml` and set in one text: a set that stands alone. */
+  /** `foldgauge.yaml` and set in one text: a set that stands alone, unless `workspace` is given. */
   readonly set: string
+  /** Text of `foldgauge.yaml`, where the rule speaks of what only a workspace can say. */
+  readonly workspace?: string
   readonly expect: {
     readonly subject: string
     readonly status: Status
@@ -51,3 +53,6 @@ export interface RuleExamples {
   readonly passing: readonly RuleExample[]
   readonly failing: readonly RuleExample[]
 }
+
+/** How every example is judged: on one day, with the windows of print scales that some rules ask for. */
+export const exampleOptions = { asOf: '2026-12-01', scales: true } as const

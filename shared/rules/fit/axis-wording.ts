@@ -15,14 +15,20 @@ export function missOf(judged: JudgedSet, axis: JudgedAxis): Miss {
   return 1 - axis.binds < target ? 'binds' : 1 - axis.rattles < target ? 'rattles' : null
 }
 
-/** `34 of 100 home-made ones would have less than 0.2 mm (5 allowed)` */
-export function sharesInWords(judged: JudgedSet, fit: JudgedFit, axis: JudgedAxis, miss: 'binds' | 'rattles'): string {
+/** `34 of 100 home-made ones would have less than 0.2 mm of room (5 allowed)` */
+export function sharesInWords(
+  judged: JudgedSet,
+  fit: JudgedFit,
+  axis: JudgedAxis,
+  miss: 'binds' | 'rattles',
+  noun: string,
+): string {
   const { band } = axis.clearance.requirement
   const isBinding = miss === 'binds'
   const share = outOfHundred(isBinding ? axis.binds : axis.rattles)
   const limit = inSetUnits(judged, (isBinding ? band.min : band.max) ?? 0)
   const allowed = outOfHundred(1 - judged.set.tokens.target)
-  return `${share} of 100 ${madeBy(judged, fit)} ones would have ${isBinding ? 'less' : 'more'} than ${limit} (${allowed} allowed)`
+  return `${share} of 100 ${madeBy(judged, fit)} ones would have ${isBinding ? 'less' : 'more'} than ${limit} ${noun} (${allowed} allowed)`
 }
 
 /** `As drawn there is 0.4 mm; about 0.3 mm more would do.` */

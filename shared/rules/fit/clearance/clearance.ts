@@ -23,14 +23,14 @@ function judgeAxisOf(judged: JudgedSet, fit: JudgedFit, axis: JudgedAxis): Pick<
   const miss = missOf(judged, axis)
   if (miss === 'binds') {
     const often = 1 - axis.binds < judged.set.tokens.floor ? '' : ' now and then'
-    const what = `${thing(fit, axis, 'binds')}${often}: ${sharesInWords(judged, fit, axis, miss)}`
+    const what = `${thing(fit, axis, 'binds')}${often}: ${sharesInWords(judged, fit, axis, miss, 'of room')}`
     return {
       severity: axis.verdict,
       message: `${what}${giveInWords(judged, fit, axis)}. ${needInWords(judged, axis, miss)}.`,
     }
   }
   if (miss === 'rattles') {
-    const what = `${thing(fit, axis, 'rattles')}: ${sharesInWords(judged, fit, axis, miss)}`
+    const what = `${thing(fit, axis, 'rattles')}: ${sharesInWords(judged, fit, axis, miss, 'of room')}`
     return { severity: axis.verdict, message: `${what}. ${needInWords(judged, axis, miss)}.` }
   }
   const has = inSetUnits(judged, axis.clearance.clearance.nominal)

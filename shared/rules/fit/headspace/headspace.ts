@@ -17,12 +17,12 @@ function judgeHeadspace(judged: JudgedSet, fit: JudgedFit, axis: JudgedAxis): Pi
   if (miss === 'binds')
     return {
       severity: axis.verdict,
-      message: `${contents} in ${fit.fit.to} holds ${lid} up: ${sharesInWords(judged, fit, axis, miss)} over it. ${needInWords(judged, axis, miss)}.`,
+      message: `${contents} in ${fit.fit.to} holds ${lid} up: ${sharesInWords(judged, fit, axis, miss, 'of headspace')}. ${needInWords(judged, axis, miss)}.`,
     }
   if (miss === 'rattles')
     return {
       severity: axis.verdict,
-      message: `${contents} moves under ${lid}: ${sharesInWords(judged, fit, axis, miss)} over it. ${needInWords(judged, axis, miss)}.`,
+      message: `${contents} moves under ${lid}: ${sharesInWords(judged, fit, axis, miss, 'of headspace')}. ${needInWords(judged, axis, miss)}.`,
     }
   const has = inSetUnits(judged, axis.clearance.clearance.nominal)
   const closes = `${outOfHundred(1 - axis.binds)} of 100 ${madeBy(judged, fit)} ones close`

@@ -14,13 +14,13 @@ function judgeOverlap(judged: JudgedSet, fit: JudgedFit, axis: JudgedAxis): Pick
     const short = axis.verdict === 'fail' ? 'does not close' : `is short of length ${what}`
     return {
       severity: axis.verdict,
-      message: `${thing} ${short}: ${sharesInWords(judged, fit, axis, miss)} ${what}. ${needInWords(judged, axis, miss)}.`,
+      message: `${thing} ${short}: ${sharesInWords(judged, fit, axis, miss, what)}. ${needInWords(judged, axis, miss)}.`,
     }
   }
   if (miss === 'rattles')
     return {
       severity: axis.verdict,
-      message: `${thing} laps too far: ${sharesInWords(judged, fit, axis, miss)}. ${needInWords(judged, axis, miss)}.`,
+      message: `${thing} laps too far: ${sharesInWords(judged, fit, axis, miss, what)}. ${needInWords(judged, axis, miss)}.`,
     }
   const has = inSetUnits(judged, axis.clearance.clearance.nominal)
   const goes = `${outOfHundred(1 - axis.binds)} of 100 ${madeBy(judged, fit)} ones have enough`

@@ -38,9 +38,8 @@ function wrongWith(judged: JudgedSet, text: string): string | null {
   const known = pieceDimensions(piece)
   if (dimension !== undefined && more.length === 0 && known.has(dimension)) return null
   const meant = dimension === undefined ? null : nearestName(dimension, known.keys())
-  const offer =
-    meant === null ? `${pieceName} has ${listInWords([...known.keys()])}` : `did you mean {${pieceName}.${meant}}?`
-  return `{${text}} names no measure of ${pieceName}: ${offer}`
+  const offer = meant === null ? `it has ${listInWords([...known.keys()])}` : `perhaps {${pieceName}.${meant}} is meant`
+  return `{${text}} names no measure of ${pieceName} (${offer})`
 }
 
 function judgeSentences(judged: JudgedSet): readonly Finding[] {
