@@ -27,6 +27,9 @@ interface Options extends JudgingOptions {
   readonly units?: string
   readonly fixes?: boolean
   readonly scales?: boolean
+  readonly against?: string
+  readonly fix?: boolean
+  readonly watch?: boolean
 }
 
 const collect = (value: string, before: readonly string[]): readonly string[] => [...before, value]
@@ -130,9 +133,12 @@ export const checkCommand: CommandModule = {
       .argument('[paths...]', 'sets, folders, patterns, or - for standard input')
       .option('--report <kind>', `${reporterNames.join(', ')}; =FILE writes it there; may be repeated`, collect, [])
       .option('--single', 'with json: one object instead of an array')
-      .option('--fail-on <what>', 'what makes the exit code 1: fail, warn', 'fail')
+      .option('--against <what>', 'also compare with a report, a set, a folder or a git revision')
+      .option('--fail-on <what>', 'what makes the exit code 1: fail, warn, or with --against only regression', 'fail')
       .option('--units <unit>', 'lengths in mm or in (default: the units of each set)')
       .option('--fixes', 'work out the smallest change that passes (text always does)')
+      .option('--fix', 'apply the smallest changes that pass to the files')
+      .option('--watch', 'judge again after every save')
       .option('--scales', 'work out the print scales at which each fit holds')
     addJudgingOptions(command)
   },
@@ -140,7 +146,7 @@ export const checkCommand: CommandModule = {
   async execute(io, words, given) {
     const options = given as unknown as Options
     const requests = (options.report.length === 0 ? ['text'] : options.report).map(parseReporter)
-    const failOn = oneOf('--fail-on', options.failOn, ['fail', 'warn'])
+    const failOn = oneOf('--fail-on', options.failOn, ['fail', 'warn', 'regression'])
     const units = options.units === undefined ? null : oneOf('--units', options.units, ['mm', 'in'])
     if (requests.filter((request) => request.file === null).length > 1) {
       throw new UsageError(
@@ -148,18 +154,66 @@ export const checkCommand: CommandModule = {
         'Send all but one to files, such as --report junit=results.xml.',
       )
     }
+    if (failOn === 'regression' && options.against === undefined) {
+      throw new UsageError('--fail-on regression needs something to compare with', 'Add --against FILE.')
+    }
     const judging = judgingOptions(io, options)
-    const inputs = await findSets(words, io)
-    if (options.single === true && inputs.length !== 1)
-      throw new UsageError(`--single is for one set; ${String(inputs.length)} are named`)
     const isText = requests.some((request) => request.name === 'text')
-    const reports = judgeInputs(io, inputs, {
-      ...judging,
-      fixes: isText || options.fixes === true,
-      scales: isText || options.scales === true,
-    })
     const presentation = presentationOf(io, units, options.single === true)
-    for (const request of requests) await present(io, request, reports, presentation)
-    return exitOf(reports, failOn)
+    const round = async (): Promise<ExitCode> => {
+      const found = await findSets(words, io)
+      if (options.single === true && found.length !== 1) {
+        throw new UsageError(`--single is for one set; ${String(found.length)} are named`)
+      }
+      const inputs = await fixed(io, found, judging, options.fix === true)
+      const asked = { fixes: isText || options.fixes === true, scales: isText || options.scales === true }
+      const reports = judgeInputs(io, inputs, { ...judging, ...asked })
+      for (const request of requests) await present(io, request, reports, presentation)
+      return options.against === undefined
+        ? exitOf(reports, failOn === 'warn' ? 'warn' : 'fail')
+        : exitAgainst(io, options.against, reports, { judging, failOn, isText, presentation })
+    }
+    if (options.watch !== true) return round()
+    const { watchSets } = await import('./check-watch.ts')
+    return watchSets(io, await findSets(words, io), async () => {
+      await round()
+    })
   },
+}
+
+interface AgainstOptions {
+  readonly judging: Omit<CheckOptions, 'file'>
+  readonly failOn: 'fail' | 'warn' | 'regression'
+  readonly isText: boolean
+  readonly presentation: Presentation
+}
+
+/** Compares with what was named; with `regression` only what got worse counts, not what was already known. */
+async function exitAgainst(
+  io: Io,
+  word: string,
+  reports: readonly Report[],
+  options: AgainstOptions,
+): Promise<ExitCode> {
+  const { againstText, gotWorse, holdAgainst } = await import('./check-against.ts')
+  const against = holdAgainst(io, word, reports, options.judging)
+  // Standard output carries the report; beside a report for programs the comparison goes to standard error.
+  const text = againstText(against, word, options.presentation)
+  if (options.isText) io.out(text)
+  else io.err(text)
+  if (options.failOn !== 'regression') return exitOf(reports, options.failOn)
+  const unusable = exitOf(reports, 'fail')
+  if (unusable === exitCode.unusable || unusable === exitCode.defect) return unusable
+  return gotWorse(against) ? exitCode.failed : exitCode.clean
+}
+
+async function fixed(
+  io: Io,
+  inputs: readonly SetInput[],
+  judging: Omit<CheckOptions, 'file'>,
+  isAsked: boolean,
+): Promise<readonly SetInput[]> {
+  if (!isAsked) return inputs
+  const { applyFixes } = await import('./check-fix.ts')
+  return inputs.map((input) => applyFixes(io, input, judging))
 }

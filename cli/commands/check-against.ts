@@ -1,0 +1,51 @@
+import { compareReports, hasRegression } from '../../shared/compare/compare-reports.ts'
+import type { Comparison } from '../../shared/compare/comparison.ts'
+import type { CheckOptions } from '../../shared/check-options.ts'
+import type { Report } from '../../shared/report/report.ts'
+import { resolveSide } from '../inputs/comparison-sides.ts'
+import { type Io } from '../io.ts'
+import { comparisonReporters } from '../reporters/comparison-reporters.ts'
+import type { Presentation } from '../reporters/reporter.ts'
+
+/** What a check is held against: a comparison for each set that was known before, and the sets that were not. */
+export interface Against {
+  readonly comparisons: readonly Comparison[]
+  readonly newcomers: readonly Report[]
+}
+
+/** Compares reports with those that a word names, set by set. @throws UsageError where the word names nothing */
+export function holdAgainst(
+  io: Io,
+  word: string,
+  reports: readonly Report[],
+  judging: Omit<CheckOptions, 'file'>,
+): Against {
+  const before = resolveSide(io, word, judging)
+  const known = (report: Report): Report | undefined =>
+    before.length === 1 && reports.length === 1 ? before[0] : before.find((old) => old.set === report.set)
+  return {
+    comparisons: reports.flatMap((report) => {
+      const old = known(report)
+      return old === undefined ? [] : [compareReports(old, report)]
+    }),
+    newcomers: reports.filter((report) => known(report) === undefined),
+  }
+}
+
+/** Something got worse, or a set nobody knew before fails. Two engines cannot be compared, which passes nothing. */
+export const gotWorse = ({ comparisons, newcomers }: Against): boolean =>
+  comparisons.some(
+    (comparison) => hasRegression(comparison) || (!comparison.isComparable && comparison.after.verdict === 'fail'),
+  ) || newcomers.some((report) => report.summary.fail > 0)
+
+/** The comparison under a text report, the sentence that decides last. */
+export function againstText(against: Against, word: string, presentation: Presentation): string {
+  const { comparisons, newcomers } = against
+  const text = comparisonReporters.text(
+    comparisons,
+    { added: newcomers.map((report) => report.set), removed: [] },
+    presentation,
+  )
+  const verdict = gotWorse(against) ? `Worse than ${word}.` : `Nothing is worse than ${word}.`
+  return `\n${text}\n${verdict}\n`
+}
