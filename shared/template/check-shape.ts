@@ -1,4 +1,5 @@
 import * as z from 'zod/mini'
+import { shapeBy, type KeyShapes, type MapSpec, type WrittenBy } from '../pieces/shape/map-spec.ts'
 import type { Path, ReportProblem } from '../pieces/reading/report-problem.ts'
 import { nearestName } from '../units/did-you-mean.ts'
 import { isRawMap, nameOfValue, rawValueAt, type RawValue } from './raw-value.ts'
@@ -7,10 +8,13 @@ type Issue = z.core.$ZodIssue
 
 const listed = (words: readonly string[]): string => words.map((word) => `“${word}”`).join(', ')
 
+/** Shapes speak Markdown, for editors; problems speak plain text. */
+const plainText = (markdown: string): string => markdown.replace(/`([^`]+)`/g, '“$1”')
+
 /** Words for what is at a path: the whole thing, a key, or an entry of a list. */
 function nameOfPlace(path: Path, whole: string, base: Path): string {
   const step = path[path.length - 1]
-  if (step === undefined || (path.length === base.length && base.length > 1)) return whole
+  if (step === undefined || path.length < base.length) return whole
   if (typeof step === 'string') return `“${step}”`
   const list = path.findLast((part) => typeof part === 'string')
   return list === undefined ? `entry ${String(step + 1)}` : `entry ${String(step + 1)} of “${list}”`
@@ -79,8 +83,7 @@ export function checkShape<S extends z.core.$ZodType>(
       return
     }
     const subject = nameOfPlace(full, whole, base)
-    // Shapes speak Markdown, for editors; problems speak plain text.
-    const wanted = issue.message.replace(/`([^`]+)`/g, '“$1”')
+    const wanted = plainText(issue.message)
     if (value === undefined) {
       const owner = capital(nameOfPlace(full.slice(0, -1), whole, base))
       report(full, 'missing-key', `${owner} needs ${subject}.`, `Write ${subject} with ${wanted}.`, 'key')
@@ -126,4 +129,69 @@ export function checkShape<S extends z.core.$ZodType>(
 
   for (const issue of result.error.issues) explain(issue, [])
   return null
+}
+
+/** What a shape takes, in words. */
+const wantedBy = (shape: z.core.$ZodType): string => {
+  const result = z.safeParse(shape, undefined, { jitless: true })
+  return result.success ? '' : (result.error.issues[0]?.message ?? '')
+}
+
+/**
+ * Holds a map against its spec, key by key.
+ * @returns what is written; `null` where it differs, which has been reported
+ */
+export function checkMap<M extends MapSpec<KeyShapes, KeyShapes>>(
+  spec: M,
+  data: RawValue,
+  base: Path,
+  whole: string,
+  report: ReportProblem,
+): WrittenBy<M> | null {
+  const wanted = plainText(spec.what)
+  if (data === null) {
+    const name = String(base[base.length - 1] ?? '')
+    report(base, 'empty-value', `Nothing is written after “${name}”.`, `Write ${wanted}, or take it out.`, 'key')
+    return null
+  }
+  if (!isRawMap(data)) {
+    report(
+      base,
+      'wrong-type',
+      `${capital(whole)} is a map of keys and values, not ${nameOfValue(data)}.`,
+      `Write ${wanted}.`,
+      'value',
+    )
+    return null
+  }
+  let isSound = true
+  const written: Record<string, unknown> = {}
+  const unknown: string[] = []
+  for (const [key, value] of Object.entries(data)) {
+    const build = Object.hasOwn(spec.needed, key)
+      ? spec.needed[key]
+      : Object.hasOwn(spec.further, key)
+        ? spec.further[key]
+        : undefined
+    if (build === undefined) {
+      unknown.push(key)
+      continue
+    }
+    const read = checkShape(shapeBy(build), value, [...base, key], whole, report)
+    if (read === null) isSound = false
+    else written[key] = read
+  }
+  for (const [key, build] of Object.entries(spec.needed)) {
+    if (Object.hasOwn(data, key)) continue
+    isSound = false
+    report(
+      [...base, key],
+      'missing-key',
+      `${capital(whole)} needs “${key}”.`,
+      `Write “${key}” with ${plainText(wantedBy(shapeBy(build)))}.`,
+      'key',
+    )
+  }
+  reportUnknownKeys(base, unknown, [...Object.keys(spec.needed), ...Object.keys(spec.further)], data, whole, report)
+  return isSound && unknown.length === 0 ? (written as WrittenBy<M>) : null
 }

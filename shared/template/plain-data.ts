@@ -219,7 +219,7 @@ export function toPlainData(contents: TreeNode, text: string, report: ReportAt):
         rangeOf(node),
         path,
       )
-      damaged.push(path)
+      damaged.push([])
       return null
     }
     if (isAlias(node)) return ofAlias(node, path, depth)

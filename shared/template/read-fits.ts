@@ -1,12 +1,12 @@
 import type { ReportProblem } from '../pieces/reading/report-problem.ts'
 import { createValueReader, type ValueReader, type Vocabulary } from '../pieces/reading/value-reader.ts'
 import { mostPieces } from '../pieces/shape/piece-base-shape.ts'
-import { checkShape } from './check-shape.ts'
+import { checkMap } from './check-shape.ts'
 import type { RawMap } from './raw-value.ts'
 import { readClearance } from './read-clearance.ts'
 import { readNamedGroup } from './read-frame.ts'
 import { isName } from './read-names.ts'
-import { fitShape, type FitWritten } from './set-shape.ts'
+import { fitSpec, type FitWritten } from './set-shape.ts'
 import type { Clearance, Fit } from './template-model.ts'
 
 const relations = ['in', 'over', 'around'] as const
@@ -135,7 +135,7 @@ export function readFits(
 ): readonly Fit[] {
   return readNamedGroup(data, 'fits', 'fits', report).flatMap(([id, raw]) => {
     const path = ['fits', id]
-    const written = checkShape(fitShape(), raw, path, 'a fit', report)
+    const written = checkMap(fitSpec, raw, path, 'a fit', report)
     if (written === null) return []
     return [
       readFit(

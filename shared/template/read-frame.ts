@@ -1,19 +1,18 @@
 import type * as z from 'zod/mini'
 import type { ReportProblem } from '../pieces/reading/report-problem.ts'
+import { shapeBy, type KeyShapes } from '../pieces/shape/map-spec.ts'
 import { checkShape, reportUnknownKeys } from './check-shape.ts'
 import { isRawMap, nameOfValue, type RawMap, type RawValue } from './raw-value.ts'
 import { checkName } from './read-names.ts'
 
-type Keys = Readonly<Record<string, () => z.core.$ZodType>>
-
-type Frame<T extends Keys> = { readonly [K in keyof T]?: z.output<ReturnType<T[K]>> }
+type Frame<T extends KeyShapes> = { readonly [K in keyof T]?: z.output<ReturnType<T[K]>> }
 
 /**
  * Reads the outermost keys of a file, each by itself, so that a mistake in one hides none in another; shapes are built
  * for the keys that are written only.
  * @param groups further keys, which are read elsewhere
  */
-export function readFrame<T extends Keys>(
+export function readFrame<T extends KeyShapes>(
   data: RawMap,
   keys: T,
   groups: readonly string[],
@@ -25,7 +24,7 @@ export function readFrame<T extends Keys>(
   for (const [key, value] of Object.entries(data)) {
     const shape = Object.hasOwn(keys, key) ? keys[key] : undefined
     if (shape !== undefined) {
-      const read = checkShape(shape(), value, [key], whole, report)
+      const read = checkShape(shapeBy(shape), value, [key], whole, report)
       if (read !== null) frame[key] = read
     } else if (!groups.includes(key)) unknown.push(key)
   }

@@ -2,7 +2,7 @@ import type { PieceGiven, PieceKindName } from '../pieces/given.ts'
 import type { Path, ReportProblem } from '../pieces/reading/report-problem.ts'
 import { createValueReader, type Vocabulary } from '../pieces/reading/value-reader.ts'
 import { writtenKinds } from '../pieces/shape-registry.ts'
-import { checkShape } from './check-shape.ts'
+import { checkMap } from './check-shape.ts'
 import { isRawMap, nameOfValue, type RawMap, type RawValue } from './raw-value.ts'
 import { readNamedGroup } from './read-frame.ts'
 
@@ -67,7 +67,7 @@ function readPiece(
   const { noun, read } = writtenKinds[kind]
   return read(
     name,
-    (shape) => checkShape(shape, raw, path, noun, report),
+    (spec) => checkMap(spec, raw, path, noun, report),
     createValueReader(path, vocabulary, report, onOpen),
   )
 }

@@ -3,7 +3,7 @@ import { createValueReader, type ValueReader, type Vocabulary } from '../pieces/
 import { nearestName } from '../units/did-you-mean.ts'
 import type { Ruler, RulerUnit } from '../units/units.ts'
 import { usualRuler } from './built-in-tokens.ts'
-import { checkShape } from './check-shape.ts'
+import { checkMap, checkShape } from './check-shape.ts'
 import { isRawMap, type RawMap } from './raw-value.ts'
 import { readClearance } from './read-clearance.ts'
 import { readGroup, readNamedGroup } from './read-frame.ts'
@@ -11,14 +11,7 @@ import { readHumidity, readShare } from './read-share.ts'
 import { readStock } from './read-stock.ts'
 import { createSizeLookup } from './size-vocabulary.ts'
 import type { Clearance, Maker, NamedSize, RuleLevel, Stock, Tokens } from './template-model.ts'
-import {
-  clearanceShape,
-  levelShape,
-  makerShape,
-  namedSizeShape,
-  stockShape,
-  type RulerWritten,
-} from './token-shapes.ts'
+import { clearanceShape, levelShape, makerSpec, namedSizeShape, stockSpec, type RulerWritten } from './token-shapes.ts'
 
 /** The keys of a file that hold one token each, as they are written. */
 export interface TokenFrame {
@@ -73,7 +66,7 @@ function readMakers(
   const makers = new Map(below.makers)
   const homeFence = makers.get('home')?.fence ?? 0
   for (const [name, raw] of readNamedGroup(data, 'makers', 'makers', report)) {
-    const written = checkShape(makerShape(), raw, ['makers', name], 'a maker', report)
+    const written = checkMap(makerSpec, raw, ['makers', name], 'a maker', report)
     const read = readerAt(['makers', name])
     const half = (key: 'cut' | 'score'): number =>
       written === null ? NaN : read.length([key], written[key], { allowZero: true })
@@ -176,7 +169,7 @@ export function readTokens(
   const readerAt = (path: Path): ValueReader => createValueReader(path, words, report, nothingOpen)
   const stocks = new Map<string, Stock>(below.stocks)
   for (const [name, raw] of readNamedGroup(data, 'stocks', 'stocks', report)) {
-    const written = checkShape(stockShape(), raw, ['stocks', name], 'a stock', report)
+    const written = checkMap(stockSpec, raw, ['stocks', name], 'a stock', report)
     if (written !== null) stocks.set(name, readStock(name, written, readerAt(['stocks', name])))
   }
   const clearances = new Map<string, Clearance>(below.clearances)

@@ -1,9 +1,9 @@
 import type { ReportProblem } from '../pieces/reading/report-problem.ts'
 import type { Vocabulary } from '../pieces/reading/value-reader.ts'
-import { checkShape } from './check-shape.ts'
+import { checkMap } from './check-shape.ts'
 import { isRawList, nameOfValue, type RawMap } from './raw-value.ts'
 import { checkRule } from './read-tokens.ts'
-import { waiverShape } from './set-shape.ts'
+import { waiverSpec } from './set-shape.ts'
 import type { Waiver } from './template-model.ts'
 
 const daysInMonth = (year: number, month: number): number => {
@@ -49,7 +49,7 @@ export function readWaivers(
   }
   return list.flatMap((raw, index) => {
     const path = ['waivers', index]
-    const written = checkShape(waiverShape(), raw, path, 'a waiver', report)
+    const written = checkMap(waiverSpec, raw, path, 'a waiver', report)
     if (written === null) return []
     checkRule(written.rule, [...path, 'rule'], 'value', knownRules, vocabulary.nearest, report)
     if (written.reason.trim() === '') {

@@ -2,14 +2,14 @@ import { formatNumber } from '../edition.ts'
 import type { Path, ReportProblem } from '../pieces/reading/report-problem.ts'
 import { createValueReader, type Vocabulary } from '../pieces/reading/value-reader.ts'
 import { builtInTokens } from './built-in-tokens.ts'
-import { checkShape } from './check-shape.ts'
+import { checkMap } from './check-shape.ts'
 import { createProblemList, type ProblemList } from './problem-list.ts'
 import type { RawMap } from './raw-value.ts'
 import { readFrame, readNamedGroup } from './read-frame.ts'
 import { readTokens } from './read-tokens.ts'
 import { readYaml, type SourceTree } from './read-yaml.ts'
 import type { Family, Workspace } from './template-model.ts'
-import { familyShape, workspaceGroups, workspaceKeys } from './workspace-shape.ts'
+import { familySpec, workspaceGroups, workspaceKeys } from './workspace-shape.ts'
 
 /** Where sets are looked for in a workspace that does not say. */
 const usualSets = ['sets/*.yaml']
@@ -51,7 +51,7 @@ export function checkFormat(written: string | undefined, report: ReportProblem):
 function readFamilies(data: RawMap, vocabulary: Vocabulary, report: ReportProblem): ReadonlyMap<string, Family> {
   const families = new Map<string, Family>()
   for (const [name, raw] of readNamedGroup(data, 'families', 'families', report)) {
-    const written = checkShape(familyShape(), raw, ['families', name], 'a family', report)
+    const written = checkMap(familySpec, raw, ['families', name], 'a family', report)
     if (written === null) continue
     const read = createValueReader(['families', name], vocabulary, report, () => undefined)
     const sizes = written.sizes ?? []

@@ -94,8 +94,9 @@ function reportYamlErrors(
       tab !== null
         ? [tab, tab + 1]
         : (findUnclosed(contents, found.code, source.text, start) ?? [start, Math.max(end, start + 1)])
-    const lineEnd = source.text.indexOf('\n', from)
-    const at = source.placeAt(from, lineEnd === -1 ? to : Math.max(Math.min(to, lineEnd), from), [])
+    // What is shown is the mistaken text on its first line, without the space after it.
+    const firstLine = source.text.slice(from, to).split('\n', 1)[0] ?? ''
+    const at = source.placeAt(from, from + (firstLine.trimEnd().length || Math.min(firstLine.length, 1)), [])
     if (lines.has(at.line)) continue
     lines.add(at.line)
     problems.report(found.code, found.message, found.hint, at)

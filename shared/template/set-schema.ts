@@ -1,7 +1,8 @@
+import { shapeOfMap } from '../pieces/shape/map-spec.ts'
 import { writtenKinds } from '../pieces/shape-registry.ts'
 import { schemaOf, schemaOfFile, type JsonSchema } from './editor-schema.ts'
 import { namePatternText } from './read-names.ts'
-import { setGroups, setKeys, waiverShape } from './set-shape.ts'
+import { setGroups, setKeys, waiverSpec } from './set-shape.ts'
 
 const kinds = Object.entries(writtenKinds)
 
@@ -43,9 +44,9 @@ export function setSchema(): JsonSchema {
         type: 'array',
         title: 'Waivers',
         description: 'Verdicts that are known and may stand for a time.',
-        items: schemaOf(waiverShape()),
+        items: schemaOf(shapeOfMap(waiverSpec)),
       },
     },
-    definitions: Object.fromEntries(kinds.map(([kind, { shape }]) => [kind, schemaOf(shape())])),
+    definitions: Object.fromEntries(kinds.map(([kind, { spec }]) => [kind, schemaOf(shapeOfMap(spec))])),
   }
 }

@@ -1,7 +1,9 @@
 import type * as z from 'zod/mini'
+import { mapSpec, shapeOfMap, type WrittenBy } from '../pieces/shape/map-spec.ts'
 import {
   eitherShape,
   flagShape,
+  later,
   lazily,
   lengthShape,
   mapShape,
@@ -14,44 +16,35 @@ import {
   wordShape,
 } from '../pieces/shape/shape-parts.ts'
 
-export const stockShape = lazily(() =>
-  mapShape(
-    {
-      title: optional(
-        textShape({ title: 'Title', description: 'What the paper is called.', examples: ['Smooth cover'] }),
-      ),
-      grammage: optional(
-        textShape({ title: 'Grammage', description: 'Weight of a square metre.', examples: ['270 gsm'] }),
-      ),
-      weight: optional(
-        textShape({
-          title: 'Basis weight',
-          description: 'Weight of a ream of the basic size, with its kind.',
-          examples: ['80 lb cover', '110 lb index'],
-        }),
-      ),
-      caliper: optional(
-        tolerancedShape({
-          title: 'Caliper',
-          description:
-            'Thickness of one sheet, best measured: ten sheets together, divided by ten. Reckoned from the weight where not given, with a warning.',
-          examples: ['0.32 mm ± 6 %', '3.2 mm / 10', '13 pt'],
-        }),
-      ),
-      grain: optional(
-        wordShape(['long', 'short'], { title: 'Grain', description: 'Which edge of the sheet the grain runs along.' }),
-      ),
-      sheet: optional(
-        textShape({
-          title: 'Sheet',
-          description: 'What this paper is bought in.',
-          examples: ['a4', 'letter', '12x12in', '700 x 500 mm'],
-        }),
-      ),
-    },
-    'a map of `grammage`, `caliper` and so on',
-    { title: 'Stock', description: 'A paper.' },
-  ),
+export const stockSpec = mapSpec(
+  {},
+  {
+    title: () => textShape({ title: 'Title', description: 'What the paper is called.', examples: ['Smooth cover'] }),
+    grammage: () => textShape({ title: 'Grammage', description: 'Weight of a square metre.', examples: ['270 gsm'] }),
+    weight: () =>
+      textShape({
+        title: 'Basis weight',
+        description: 'Weight of a ream of the basic size, with its kind.',
+        examples: ['80 lb cover', '110 lb index'],
+      }),
+    caliper: () =>
+      tolerancedShape({
+        title: 'Caliper',
+        description:
+          'Thickness of one sheet, best measured: ten sheets together, divided by ten. Reckoned from the weight where not given, with a warning.',
+        examples: ['0.32 mm ± 6 %', '3.2 mm / 10', '13 pt'],
+      }),
+    grain: () =>
+      wordShape(['long', 'short'], { title: 'Grain', description: 'Which edge of the sheet the grain runs along.' }),
+    sheet: () =>
+      textShape({
+        title: 'Sheet',
+        description: 'What this paper is bought in.',
+        examples: ['a4', 'letter', '12x12in', '700 x 500 mm'],
+      }),
+  },
+  'a map of `grammage`, `caliper` and so on',
+  { title: 'Stock', description: 'A paper.' },
 )
 
 const axisRange = (title: string, description: string) => optional(rangeShape({ title, description }))
@@ -75,43 +68,46 @@ export const clearanceMapShape = lazily(() =>
   ),
 )
 
-export const makerShape = lazily(() =>
-  mapShape(
-    {
-      cut: lengthShape({
+export const makerSpec = mapSpec(
+  {
+    cut: () =>
+      lengthShape({
         title: 'Cut',
         description: 'How far a cut may lie from its mark (half-width).',
         examples: ['0.3 mm'],
       }),
-      score: lengthShape({
+    score: () =>
+      lengthShape({
         title: 'Score',
         description: 'How far a score may lie from its mark (half-width).',
         examples: ['0.2 mm'],
       }),
-      fence: optional(
-        lengthShape({
-          title: 'Fence',
-          description: 'How far the stop of a scoring board may be off (half-width); else as for `home`.',
-          examples: ['0.25 mm'],
-        }),
-      ),
-    },
-    'a map of `cut` and `score`',
-    { title: 'Maker', description: 'How exactly a class of makers works.' },
-  ),
+  },
+  {
+    fence: () =>
+      lengthShape({
+        title: 'Fence',
+        description: 'How far the stop of a scoring board may be off (half-width); else as for `home`.',
+        examples: ['0.25 mm'],
+      }),
+  },
+  'a map of `cut` and `score`',
+  { title: 'Maker', description: 'How exactly a class of makers works.' },
 )
 
 const rulerShape = () =>
   eitherShape(
     [
       lengthShape({ description: 'For cutting and for scoring.', examples: ['1 mm', '1/16 in'] }),
-      mapShape(
-        {
-          cut: lengthShape({ title: 'Cut', description: 'Finest mark for cutting.', examples: ['1/16 in'] }),
-          score: lengthShape({ title: 'Score', description: 'Finest mark for scoring.', examples: ['1/8 in'] }),
-        },
-        'a map of `cut` and `score`',
-        { description: 'One for cutting and one for scoring.' },
+      later(() =>
+        mapShape(
+          {
+            cut: lengthShape({ title: 'Cut', description: 'Finest mark for cutting.', examples: ['1/16 in'] }),
+            score: lengthShape({ title: 'Score', description: 'Finest mark for scoring.', examples: ['1/8 in'] }),
+          },
+          'a map of `cut` and `score`',
+          { description: 'One for cutting and one for scoring.' },
+        ),
       ),
     ],
     'a length, or `{ cut, score }`',
@@ -124,7 +120,7 @@ const rulerShape = () =>
 
 export const clearanceShape = lazily(() =>
   eitherShape(
-    [rangeShape({ description: 'Along the length and along the width.' }), clearanceMapShape()],
+    [rangeShape({ description: 'Along the length and along the width.' }), later(clearanceMapShape)],
     'a range such as `0.2..3 mm`, or a map of ranges',
     { title: 'Clearance', description: 'What must be left in all, along each axis.' },
   ),
@@ -179,7 +175,7 @@ export const tokenKeys = {
 
 /** Keys of a workspace and of a set that hold entries by name. */
 export const tokenGroups = {
-  stocks: { entry: stockShape, words: { title: 'Stocks', description: 'The papers, by name.' } },
+  stocks: { entry: () => shapeOfMap(stockSpec), words: { title: 'Stocks', description: 'The papers, by name.' } },
   sizes: {
     entry: namedSizeShape,
     words: {
@@ -193,7 +189,7 @@ export const tokenGroups = {
     words: { title: 'Clearances', description: 'Named requirements, in all along an axis.' },
   },
   makers: {
-    entry: makerShape,
+    entry: () => shapeOfMap(makerSpec),
     words: { title: 'Makers', description: 'Classes of makers beside `home`, `studio` and `die`.' },
   },
   checks: {
@@ -202,7 +198,7 @@ export const tokenGroups = {
   },
 } as const
 
-export type StockWritten = z.output<ReturnType<typeof stockShape>>
-export type MakerWritten = z.output<ReturnType<typeof makerShape>>
+export type StockWritten = WrittenBy<typeof stockSpec>
+export type MakerWritten = WrittenBy<typeof makerSpec>
 export type RulerWritten = z.output<ReturnType<typeof rulerShape>>
 export type ClearanceWritten = z.output<ReturnType<typeof clearanceShape>>

@@ -1,10 +1,10 @@
-import type * as z from 'zod/mini'
 import { bannerKey } from '../card/card-shape.ts'
-import { pieceBaseKeys, stockKey, switchKey } from '../shape/piece-base-shape.ts'
+import { mapSpec, type WrittenBy } from '../shape/map-spec.ts'
+import { kindKey, pieceBaseKeys, stockShape, switchShape } from '../shape/piece-base-shape.ts'
 import {
+  later,
   angleShape,
   eitherShape,
-  lazily,
   lengthOrFitShape,
   lengthShape,
   listShape,
@@ -22,10 +22,12 @@ const wallPair = (title: string, description: string) =>
   eitherShape(
     [
       lengthShape({ description: 'Both walls.' }),
-      pairShape(lengthShape({ description: 'One wall.' }), 'two lengths', {
-        description: 'One wall and the one that faces it.',
-        examples: [[20, 22]],
-      }),
+      later(() =>
+        pairShape(lengthShape({ description: 'One wall.' }), 'two lengths', {
+          description: 'One wall and the one that faces it.',
+          examples: [[20, 22]],
+        }),
+      ),
     ],
     'a length, or two such as `[20, 22]`',
     { title, description },
@@ -35,13 +37,15 @@ const wallShape = () =>
   eitherShape(
     [
       lengthOrFitShape({ description: 'All four walls.' }),
-      mapShape(
-        {
-          length: wallPair('Along the length', 'The two walls that face each other along the length.'),
-          width: wallPair('Along the width', 'The two walls that face each other along the width.'),
-        },
-        'a map of `length` and `width`',
-        { description: 'Walls that are not all alike.' },
+      later(() =>
+        mapShape(
+          {
+            length: wallPair('Along the length', 'The two walls that face each other along the length.'),
+            width: wallPair('Along the width', 'The two walls that face each other along the width.'),
+          },
+          'a map of `length` and `width`',
+          { description: 'Walls that are not all alike.' },
+        ),
       ),
     ],
     'a length for all four walls, `{ length: [20, 20], width: [22, 22] }`, or `fit`',
@@ -75,7 +79,7 @@ const tabsShape = () =>
 const layerShape = () =>
   mapShape(
     {
-      stock: stockKey(),
+      stock: stockShape(),
       size: sizeShape({ title: 'Size', description: 'Size of the panel.', examples: ['90 x 15 mm'] }),
       on: wordShape(['top', 'length', 'width'], {
         title: 'On',
@@ -88,60 +92,60 @@ const layerShape = () =>
     { title: 'Layer', description: 'A panel stuck on the outside.' },
   )
 
-const trayKeys = () => ({
-  stock: stockKey(),
-  blank: optional(
+const trayKeys = {
+  blank: () =>
     sizeOrFitShape({
       title: 'Blank',
       description: 'Size of the flat sheet, with `wall`; or `fit`.',
       examples: ['200 x 158 mm', 'fit'],
     }),
-  ),
-  wall: optional(wallShape()),
-  inside: optional(
+  wall: wallShape,
+  inside: () =>
     spaceShape({
       title: 'Inside',
       description: 'Size it must have inside, length, width and depth; then its blank is reckoned. Or `fit`.',
       examples: ['160 x 118 x 20 mm', 'fit'],
     }),
-  ),
-  tabs: optional(tabsShape()),
-  walls: optional(
+  tabs: tabsShape,
+  walls: () =>
     wordShape(['single', 'doubled'], {
       title: 'Walls',
       description: '`single` (the default), or `doubled`: folded over to the inside.',
     }),
-  ),
-  'thumb-notch': switchKey('Thumb notch', 'A notch in the wall, by which a lid is lifted off.'),
-  covered: optional(
+  'thumb-notch': () => switchShape('Thumb notch', 'A notch in the wall, by which a lid is lifted off.'),
+  covered: () =>
     nameShape('a stock', {
       title: 'Covered',
       description: 'Stock of a covering paper outside; its thickness counts.',
       examples: ['text-120'],
     }),
-  ),
-  layers: optional(
+  layers: () =>
     listShape(layerShape(), 'a list of layers', {
       title: 'Layers',
       description: 'Panels stuck on a wall or on the top.',
     }),
-  ),
-})
+} as const
 
 /** What an author writes of a box. */
-export const boxShape = lazily(() =>
-  mapShape({ ...pieceBaseKeys('box'), ...trayKeys() }, 'a map that describes a box', {
+export const boxSpec = mapSpec(
+  { ...kindKey('box'), stock: stockShape },
+  { ...pieceBaseKeys, ...trayKeys },
+  'a map that describes a box',
+  {
     title: 'Box',
     description: 'A tray with four walls; the base of a box with a lid.',
-  }),
+  },
 )
 
 /** What an author writes of a lid: a box turned over. */
-export const lidShape = lazily(() =>
-  mapShape({ ...pieceBaseKeys('lid'), ...trayKeys() }, 'a map that describes a lid', {
+export const lidSpec = mapSpec(
+  { ...kindKey('lid'), stock: stockShape },
+  { ...pieceBaseKeys, ...trayKeys },
+  'a map that describes a lid',
+  {
     title: 'Lid',
     description: 'A tray with four walls that goes over a box.',
-  }),
+  },
 )
 
-export type BoxWritten = z.output<ReturnType<typeof boxShape>> | z.output<ReturnType<typeof lidShape>>
+export type BoxWritten = WrittenBy<typeof boxSpec> | WrittenBy<typeof lidSpec>

@@ -1,9 +1,9 @@
-import type * as z from 'zod/mini'
-import { pieceBaseKeys, stockKey, switchKey } from '../shape/piece-base-shape.ts'
+import { mapSpec, type WrittenBy } from '../shape/map-spec.ts'
+import { kindKey, pieceBaseKeys, stockShape, switchShape } from '../shape/piece-base-shape.ts'
 import {
+  later,
   countShape,
   eitherShape,
-  lazily,
   lengthShape,
   listShape,
   mapShape,
@@ -37,7 +37,7 @@ export const bannerKey = () =>
 const layerShape = () =>
   mapShape(
     {
-      stock: stockKey(),
+      stock: stockShape(),
       size: sizeShape({
         title: 'Size',
         description: 'Size of the panel, first its extent along the length of the card.',
@@ -47,16 +47,18 @@ const layerShape = () =>
         eitherShape(
           [
             wordShape(['centre'], { description: 'In the middle of the card.' }),
-            pairShape(
-              lengthShape({
-                description: 'Distance of its middle from the middle of the card; left and down are negative.',
-              }),
-              'two distances',
-              {
-                description:
-                  'Distance of its middle from the middle of the card, along the length and along the width.',
-                examples: [[0, 20]],
-              },
+            later(() =>
+              pairShape(
+                lengthShape({
+                  description: 'Distance of its middle from the middle of the card; left and down are negative.',
+                }),
+                'two distances',
+                {
+                  description:
+                    'Distance of its middle from the middle of the card, along the length and along the width.',
+                  examples: [[0, 20]],
+                },
+              ),
             ),
           ],
           '`centre` or two distances from the middle, such as `[0, 20]`',
@@ -73,105 +75,98 @@ const layerShape = () =>
           description: 'What it is glued on: the `front` (the default) or the `inside`.',
         }),
       ),
-      inside: switchKey('Inside', 'The same as `on: inside`.'),
+      inside: optional(switchShape('Inside', 'The same as `on: inside`.')),
     },
     'a map of `stock`, `size` and `at`',
     { title: 'Layer', description: 'A panel or flag glued on the card; its thickness counts.' },
   )
 
 /** What an author writes of a card. */
-export const cardShape = lazily(() =>
-  mapShape(
-    {
-      ...pieceBaseKeys('card'),
-      stock: stockKey(),
-      folded: sizeOrFitShape({
+export const cardSpec = mapSpec(
+  {
+    ...kindKey('card'),
+    stock: stockShape,
+    folded: () =>
+      sizeOrFitShape({
         title: 'Size when folded',
         description: 'Size of the card folded shut, or of an unfolded one; a size, a name, or `fit`.',
       }),
-      fold: optional(
-        wordShape(['long-edge', 'short-edge', 'none'], {
-          title: 'Fold',
-          description:
-            'Which edge the fold lies along: `long-edge` (the default), `short-edge`, or `none` for a flat card.',
-        }),
+  },
+  {
+    ...pieceBaseKeys,
+    fold: () =>
+      wordShape(['long-edge', 'short-edge', 'none'], {
+        title: 'Fold',
+        description:
+          'Which edge the fold lies along: `long-edge` (the default), `short-edge`, or `none` for a flat card.',
+      }),
+    panels: () =>
+      countShape({ title: 'Panels', description: 'How many panels the sheet is folded into.', examples: [3] }, 2, 6),
+    style: () =>
+      wordShape(['single', 'roll', 'accordion', 'gate'], {
+        title: 'Style of folding',
+        description:
+          '`single` (the default): once. `roll`: each panel into the next. `accordion`: to and fro. `gate`: two leaves that meet in the middle.',
+      }),
+    blank: () =>
+      sizeShape({
+        title: 'Blank',
+        description: 'Size of the flat sheet, where it is not what the folded size asks for.',
+      }),
+    'panel-widths': () =>
+      listShape(
+        lengthShape({ description: 'Width of one panel across the fold.' }),
+        'a list of lengths, such as `[105, 104, 103]`',
+        {
+          title: 'Panel widths',
+          description: 'Widths of the panels across the fold, the outermost first.',
+          examples: [[105, 104, 103]],
+        },
       ),
-      panels: optional(
-        countShape({ title: 'Panels', description: 'How many panels the sheet is folded into.', examples: [3] }, 2, 6),
+    raised: () =>
+      tolerancedShape({
+        title: 'Raised',
+        description: 'Height of what is stuck on the card, taken as lying in the middle with a rim of 10 mm.',
+        examples: ['0.8 mm', '3 mm ± 0.5 mm'],
+      }),
+    'raised-to-edge': () => switchShape('Raised to the edge', 'What is stuck on reaches the edge of the card.'),
+    layers: () =>
+      listShape(layerShape(), 'a list of layers', {
+        title: 'Layers',
+        description: 'Panels and flags glued on, placed from the centre of the card.',
+      }),
+    insert: () =>
+      mapShape(
+        {
+          stock: stockShape(),
+          loose: optional(switchShape('Loose', 'It lies in the card and is not glued.')),
+          folded: optional(switchShape('Folded', 'It is folded with the card, so it counts twice.')),
+        },
+        'a map with a `stock`',
+        { title: 'Insert', description: 'A sheet that lies inside the card.' },
       ),
-      style: optional(
-        wordShape(['single', 'roll', 'accordion', 'gate'], {
-          title: 'Style of folding',
-          description:
-            '`single` (the default): once. `roll`: each panel into the next. `accordion`: to and fro. `gate`: two leaves that meet in the middle.',
-        }),
-      ),
-      blank: optional(
-        sizeShape({
-          title: 'Blank',
-          description: 'Size of the flat sheet, where it is not what the folded size asks for.',
-        }),
-      ),
-      'panel-widths': optional(
-        listShape(
-          lengthShape({ description: 'Width of one panel across the fold.' }),
-          'a list of lengths, such as `[105, 104, 103]`',
-          {
-            title: 'Panel widths',
-            description: 'Widths of the panels across the fold, the outermost first.',
-            examples: [[105, 104, 103]],
-          },
-        ),
-      ),
-      raised: optional(
-        tolerancedShape({
-          title: 'Raised',
-          description: 'Height of what is stuck on the card, taken as lying in the middle with a rim of 10 mm.',
-          examples: ['0.8 mm', '3 mm ± 0.5 mm'],
-        }),
-      ),
-      'raised-to-edge': switchKey('Raised to the edge', 'What is stuck on reaches the edge of the card.'),
-      layers: optional(
-        listShape(layerShape(), 'a list of layers', {
-          title: 'Layers',
-          description: 'Panels and flags glued on, placed from the centre of the card.',
-        }),
-      ),
-      insert: optional(
-        mapShape(
-          {
-            stock: stockKey(),
-            loose: switchKey('Loose', 'It lies in the card and is not glued.'),
-            folded: switchKey('Folded', 'It is folded with the card, so it counts twice.'),
-          },
-          'a map with a `stock`',
-          { title: 'Insert', description: 'A sheet that lies inside the card.' },
-        ),
-      ),
-      pocket: optional(
-        mapShape(
-          {
-            depth: lengthShape({
-              title: 'Depth',
-              description: 'How far the panel is folded up from the bottom edge.',
-              examples: ['50 mm'],
+    pocket: () =>
+      mapShape(
+        {
+          depth: lengthShape({
+            title: 'Depth',
+            description: 'How far the panel is folded up from the bottom edge.',
+            examples: ['50 mm'],
+          }),
+          side: optional(
+            lengthShape({
+              title: 'Side',
+              description: 'Width of the strip that is glued at each end.',
+              default: '10 mm',
             }),
-            side: optional(
-              lengthShape({
-                title: 'Side',
-                description: 'Width of the strip that is glued at each end.',
-                default: '10 mm',
-              }),
-            ),
-          },
-          'a map with a `depth`',
-          { title: 'Pocket', description: 'A panel folded up from the bottom edge that holds another piece.' },
-        ),
+          ),
+        },
+        'a map with a `depth`',
+        { title: 'Pocket', description: 'A panel folded up from the bottom edge that holds another piece.' },
       ),
-    },
-    'a map that describes a card',
-    { title: 'Card', description: 'A folded card, or a flat one where `fold` is `none`.' },
-  ),
+  },
+  'a map that describes a card',
+  { title: 'Card', description: 'A folded card, or a flat one where `fold` is `none`.' },
 )
 
-export type CardWritten = z.output<ReturnType<typeof cardShape>>
+export type CardWritten = WrittenBy<typeof cardSpec>

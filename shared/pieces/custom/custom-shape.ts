@@ -1,8 +1,7 @@
-import type * as z from 'zod/mini'
-import { pieceBaseKeys, stockKey } from '../shape/piece-base-shape.ts'
+import { mapSpec, type WrittenBy } from '../shape/map-spec.ts'
+import { kindKey, pieceBaseKeys, stockShape } from '../shape/piece-base-shape.ts'
 import {
   angleShape,
-  lazily,
   lengthShape,
   listShape,
   mapShape,
@@ -19,68 +18,63 @@ const pointShape = (description: string) =>
   })
 
 /** What an author writes of any other shape. */
-export const customShape = lazily(() =>
-  mapShape(
-    {
-      ...pieceBaseKeys('custom'),
-      stock: stockKey(),
-      outline: listShape(
-        pointShape('A corner of the blank.'),
-        'a list of points, such as `[[0, 0], [90, 0], [90, 60]]`',
-        {
-          title: 'Outline',
-          description: 'The corners of the blank in order.',
-          examples: [
-            [
-              [0, 0],
-              [90, 0],
-              [90, 60],
-              [0, 60],
-            ],
+export const customSpec = mapSpec(
+  {
+    ...kindKey('custom'),
+    stock: stockShape,
+    outline: () =>
+      listShape(pointShape('A corner of the blank.'), 'a list of points, such as `[[0, 0], [90, 0], [90, 60]]`', {
+        title: 'Outline',
+        description: 'The corners of the blank in order.',
+        examples: [
+          [
+            [0, 0],
+            [90, 0],
+            [90, 60],
+            [0, 60],
           ],
-        },
-      ),
-      scores: optional(
-        listShape(
-          mapShape(
-            {
-              from: pointShape('Where the score begins.'),
-              to: pointShape('Where the score ends.'),
-              fold: optional(
-                wordShape(['valley', 'mountain'], {
-                  title: 'Fold',
-                  description: '`valley` (the default): towards you. `mountain`: away from you.',
-                }),
-              ),
-              angle: optional(
-                angleShape({ title: 'Angle', description: 'How far it is folded, in degrees.', default: 90 }),
-              ),
-            },
-            'a map of `from`, `to`, `fold` and `angle`',
-            { title: 'Score', description: 'A line pressed for folding.' },
-          ),
-          'a list of scores, such as `[{ from: [45, 0], to: [45, 60], fold: valley, angle: 180 }]`',
-          { title: 'Scores', description: 'The lines pressed for folding.' },
+        ],
+      }),
+  },
+  {
+    ...pieceBaseKeys,
+    scores: () =>
+      listShape(
+        mapShape(
+          {
+            from: pointShape('Where the score begins.'),
+            to: pointShape('Where the score ends.'),
+            fold: optional(
+              wordShape(['valley', 'mountain'], {
+                title: 'Fold',
+                description: '`valley` (the default): towards you. `mountain`: away from you.',
+              }),
+            ),
+            angle: optional(
+              angleShape({ title: 'Angle', description: 'How far it is folded, in degrees.', default: 90 }),
+            ),
+          },
+          'a map of `from`, `to`, `fold` and `angle`',
+          { title: 'Score', description: 'A line pressed for folding.' },
         ),
+        'a list of scores, such as `[{ from: [45, 0], to: [45, 60], fold: valley, angle: 180 }]`',
+        { title: 'Scores', description: 'The lines pressed for folding.' },
       ),
-      inside: optional(
-        spaceShape({
-          title: 'Inside',
-          description: 'Declared size inside; it is believed.',
-          examples: ['88 x 58 x 20 mm'],
-        }),
-      ),
-      outside: optional(
-        spaceShape({
-          title: 'Outside',
-          description: 'Declared size outside; it is believed.',
-          examples: ['90 x 60 x 21 mm'],
-        }),
-      ),
-    },
-    'a map that describes a piece',
-    { title: 'Custom piece', description: 'Anything else: its geometry is checked, its declared sizes are believed.' },
-  ),
+    inside: () =>
+      spaceShape({
+        title: 'Inside',
+        description: 'Declared size inside; it is believed.',
+        examples: ['88 x 58 x 20 mm'],
+      }),
+    outside: () =>
+      spaceShape({
+        title: 'Outside',
+        description: 'Declared size outside; it is believed.',
+        examples: ['90 x 60 x 21 mm'],
+      }),
+  },
+  'a map that describes a piece',
+  { title: 'Custom piece', description: 'Anything else: its geometry is checked, its declared sizes are believed.' },
 )
 
-export type CustomWritten = z.output<ReturnType<typeof customShape>>
+export type CustomWritten = WrittenBy<typeof customSpec>

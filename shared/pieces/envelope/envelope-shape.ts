@@ -1,12 +1,11 @@
-import type * as z from 'zod/mini'
-import { pieceBaseKeys, stockKey } from '../shape/piece-base-shape.ts'
+import { mapSpec, type WrittenBy } from '../shape/map-spec.ts'
+import { kindKey, pieceBaseKeys, stockShape } from '../shape/piece-base-shape.ts'
 import {
+  later,
   eitherShape,
-  lazily,
   lengthShape,
   mapShape,
   nameShape,
-  optional,
   pairShape,
   sizeOrFitShape,
   sizeShape,
@@ -17,17 +16,19 @@ const seamShape = () =>
   eitherShape(
     [
       lengthShape({ description: 'Width of all seams.', examples: [12] }),
-      mapShape(
-        {
-          bottom: lengthShape({
-            title: 'Bottom',
-            description: 'Width of the seams of the bottom flap.',
-            examples: [12],
-          }),
-          top: lengthShape({ title: 'Top', description: 'Width of the seams of the seal flap.', examples: [15] }),
-        },
-        'a map of `bottom` and `top`',
-        { description: 'Widths of the seams at the bottom and at the top.' },
+      later(() =>
+        mapShape(
+          {
+            bottom: lengthShape({
+              title: 'Bottom',
+              description: 'Width of the seams of the bottom flap.',
+              examples: [12],
+            }),
+            top: lengthShape({ title: 'Top', description: 'Width of the seams of the seal flap.', examples: [15] }),
+          },
+          'a map of `bottom` and `top`',
+          { description: 'Widths of the seams at the bottom and at the top.' },
+        ),
       ),
     ],
     'a length, or `{ bottom, top }`',
@@ -44,10 +45,12 @@ const cornersShape = () =>
       sides: eitherShape(
         [
           lengthShape({ description: 'Both side corners.', examples: [101] }),
-          pairShape(lengthShape({ description: 'One side corner.' }), 'two lengths, left and right', {
-            description: 'Left and right corner.',
-            examples: [[101, 100]],
-          }),
+          later(() =>
+            pairShape(lengthShape({ description: 'One side corner.' }), 'two lengths, left and right', {
+              description: 'Left and right corner.',
+              examples: [[101, 100]],
+            }),
+          ),
         ],
         'a length, or two for left and right',
         { title: 'Sides', description: 'How far from the side corners the folds cut both edges.' },
@@ -71,64 +74,60 @@ const cornersShape = () =>
   )
 
 /** What an author writes of an envelope. */
-export const envelopeShape = lazily(() =>
-  mapShape(
-    {
-      ...pieceBaseKeys('envelope'),
-      stock: stockKey(),
-      style: wordShape(['baronial', 'square-flap'], {
+export const envelopeSpec = mapSpec(
+  {
+    ...kindKey('envelope'),
+    stock: stockShape,
+    style: () =>
+      wordShape(['baronial', 'square-flap'], {
         title: 'Style',
         description:
           '`baronial`: pointed flaps folded from a square. `square-flap`: a face with side flaps, a back and a square seal flap.',
       }),
-      pocket: optional(
-        sizeOrFitShape({
-          title: 'Pocket',
-          description: 'Size of the pocket from score to score, or `fit`.',
-          examples: ['156 x 112 mm', 'fit'],
-        }),
-      ),
-      seam: optional(seamShape()),
-      blank: optional(
-        sizeShape({
-          title: 'Blank',
-          description: 'The square that a baronial envelope is folded from, with `corners`.',
-          examples: ['210 x 210 mm'],
-        }),
-      ),
-      corners: optional(cornersShape()),
-      back: optional(
-        lengthShape({
-          title: 'Back',
-          description: 'Height of the back of a square-flap envelope; else the pocket less 6 mm.',
-          examples: ['100 mm'],
-        }),
-      ),
-      'side-flap': optional(
-        lengthShape({
-          title: 'Side flap',
-          description: 'Width of the side flaps of a square-flap envelope; else 15 mm.',
-          examples: ['15 mm'],
-        }),
-      ),
-      flap: optional(
-        lengthShape({
-          title: 'Seal flap',
-          description: 'Depth of the seal flap of a square-flap envelope; else 0.4 of the pocket’s width.',
-          examples: ['45 mm'],
-        }),
-      ),
-      liner: optional(
-        nameShape('a stock', {
-          title: 'Liner',
-          description: 'Stock of a liner; its thickness counts.',
-          examples: ['text-120'],
-        }),
-      ),
-    },
-    'a map that describes an envelope',
-    { title: 'Envelope', description: 'An envelope made from one sheet.' },
-  ),
+  },
+  {
+    ...pieceBaseKeys,
+    pocket: () =>
+      sizeOrFitShape({
+        title: 'Pocket',
+        description: 'Size of the pocket from score to score, or `fit`.',
+        examples: ['156 x 112 mm', 'fit'],
+      }),
+    seam: seamShape,
+    blank: () =>
+      sizeShape({
+        title: 'Blank',
+        description: 'The square that a baronial envelope is folded from, with `corners`.',
+        examples: ['210 x 210 mm'],
+      }),
+    corners: cornersShape,
+    back: () =>
+      lengthShape({
+        title: 'Back',
+        description: 'Height of the back of a square-flap envelope; else the pocket less 6 mm.',
+        examples: ['100 mm'],
+      }),
+    'side-flap': () =>
+      lengthShape({
+        title: 'Side flap',
+        description: 'Width of the side flaps of a square-flap envelope; else 15 mm.',
+        examples: ['15 mm'],
+      }),
+    flap: () =>
+      lengthShape({
+        title: 'Seal flap',
+        description: 'Depth of the seal flap of a square-flap envelope; else 0.4 of the pocket’s width.',
+        examples: ['45 mm'],
+      }),
+    liner: () =>
+      nameShape('a stock', {
+        title: 'Liner',
+        description: 'Stock of a liner; its thickness counts.',
+        examples: ['text-120'],
+      }),
+  },
+  'a map that describes an envelope',
+  { title: 'Envelope', description: 'An envelope made from one sheet.' },
 )
 
-export type EnvelopeWritten = z.output<ReturnType<typeof envelopeShape>>
+export type EnvelopeWritten = WrittenBy<typeof envelopeSpec>

@@ -65,7 +65,7 @@ export interface ValueReader {
 
 /** Words that look like names rather than measures: they begin with a letter, or hold nothing but words and hyphens. */
 const looksLikeName = (text: string): boolean =>
-  /^[\p{L}_][\p{L}\p{N}_-]*$/u.test(text) || /^\d+(-\p{L}[\p{L}\p{N}]*)+$/u.test(text)
+  /^[a-z_\u00c0-\uffff][\w\u00c0-\uffff-]*$/i.test(text) || /^\d+(-[a-z][a-z0-9]*)+$/i.test(text)
 
 /** Longer than any measure. */
 const longestValue = 120

@@ -116,4 +116,7 @@ export const namedShape = <S extends Shape>(entry: S, pattern: string, words: Wo
 export const eitherShape = <const T extends readonly [Shape, ...Shape[]]>(options: T, what: string, words: Words) =>
   described(z.union(options, what), words)
 
+/** A further option of a choice, built only where those before it do not fit. */
+export const later = <S extends Shape>(build: () => S) => z.lazy(build)
+
 export const optional = <S extends Shape>(shape: S) => z.optional(shape)

@@ -1,36 +1,24 @@
-import type * as z from 'zod/mini'
-import { pieceBaseKeys, stockKey } from '../shape/piece-base-shape.ts'
-import {
-  lazily,
-  lengthShape,
-  listShape,
-  mapShape,
-  nameShape,
-  optional,
-  sizeOrFitShape,
-  wordShape,
-} from '../shape/shape-parts.ts'
+import { mapSpec, type WrittenBy } from '../shape/map-spec.ts'
+import { kindKey, pieceBaseKeys, stockShape } from '../shape/piece-base-shape.ts'
+import { lengthShape, listShape, nameShape, sizeOrFitShape, wordShape } from '../shape/shape-parts.ts'
 
 /** Keys of whatever goes round something. */
-export const wrapKeys = () => ({
-  around: optional(
+export const wrapKeys = {
+  around: () =>
     nameShape('a piece', {
       title: 'Around',
       description: 'The piece that it goes round; else the one that a fit says.',
       examples: ['lid'],
     }),
-  ),
-  overlap: optional(
+  overlap: () =>
     lengthShape({ title: 'Overlap', description: 'How far the ends lap over one another.', default: '15 mm' }),
-  ),
-  girth: optional(
+  girth: () =>
     wordShape(['width', 'length'], {
       title: 'Girth',
       description:
         'Which girth it goes round: over the `width` and the height (the default, the shorter), or over the `length` and the height.',
     }),
-  ),
-  scores: optional(
+  scores: () =>
     listShape(
       lengthShape({ description: 'Distance of a score from one end.' }),
       'a list of lengths, such as `[80, 100, 180, 200]`',
@@ -40,34 +28,29 @@ export const wrapKeys = () => ({
         examples: [[80, 100, 180, 200]],
       },
     ),
-  ),
-})
+} as const
 
 /** What an author writes of a sleeve. */
-export const sleeveShape = lazily(() =>
-  mapShape(
-    {
-      ...pieceBaseKeys('sleeve'),
-      stock: stockKey(),
-      ...wrapKeys(),
-      width: optional(
-        lengthShape({
-          title: 'Width',
-          description: 'Extent along the tube; else it covers what it goes round.',
-          examples: ['60 mm'],
-        }),
-      ),
-      blank: optional(
-        sizeOrFitShape({
-          title: 'Blank',
-          description: 'Length round the girth and width along the tube, with four `scores`; or `fit`.',
-          examples: ['300 x 60 mm', 'fit'],
-        }),
-      ),
-    },
-    'a map that describes a sleeve',
-    { title: 'Sleeve', description: 'An open tube with square corners round a box.' },
-  ),
+export const sleeveSpec = mapSpec(
+  { ...kindKey('sleeve'), stock: stockShape },
+  {
+    ...pieceBaseKeys,
+    ...wrapKeys,
+    width: () =>
+      lengthShape({
+        title: 'Width',
+        description: 'Extent along the tube; else it covers what it goes round.',
+        examples: ['60 mm'],
+      }),
+    blank: () =>
+      sizeOrFitShape({
+        title: 'Blank',
+        description: 'Length round the girth and width along the tube, with four `scores`; or `fit`.',
+        examples: ['300 x 60 mm', 'fit'],
+      }),
+  },
+  'a map that describes a sleeve',
+  { title: 'Sleeve', description: 'An open tube with square corners round a box.' },
 )
 
-export type SleeveWritten = z.output<ReturnType<typeof sleeveShape>>
+export type SleeveWritten = WrittenBy<typeof sleeveSpec>
