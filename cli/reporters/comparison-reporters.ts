@@ -24,6 +24,7 @@ const flipWords: Readonly<Record<VerdictChange['flip'], string>> = {
   'now-passing': 'now passes',
   milder: 'is milder now',
   'newly-waived': 'is waived now',
+  'no-longer-judged': 'is no longer judged',
   added: 'is new',
   removed: 'is gone',
 }

@@ -13,7 +13,15 @@ export interface ComparedSide {
   readonly works: number
 }
 
-export type Flip = 'newly-failing' | 'newly-warning' | 'now-passing' | 'milder' | 'newly-waived' | 'added' | 'removed'
+export type Flip =
+  | 'newly-failing'
+  | 'newly-warning'
+  | 'now-passing'
+  | 'milder'
+  | 'newly-waived'
+  | 'no-longer-judged'
+  | 'added'
+  | 'removed'
 
 /** A verdict that is another than before. `before` or `after` is `null` where the subject exists on one side only. */
 export interface VerdictChange {

@@ -17,6 +17,7 @@ function flipOf(before: Status | null, after: Status | null): Flip {
   if (after === null) return 'removed'
   if (after === 'fail' || after === 'crashed') return 'newly-failing'
   if (after === 'waived') return 'newly-waived'
+  if (after === 'unchecked') return 'no-longer-judged'
   if (after === 'warn') return rank[after] > rank[before] ? 'newly-warning' : 'milder'
   return 'now-passing'
 }
@@ -36,14 +37,23 @@ export function piecesOfFit(report: Report, fitId: string): readonly string[] {
   return [...put, fit.to, ...(fit.holding === null ? [] : [fit.holding])]
 }
 
+const isConsequence = ({ what }: DimensionChange): boolean => /^(inside|outside|thickness)\b/.test(what)
+
 function causesOf(report: Report, subject: string, dimensions: readonly DimensionChange[]): readonly string[] {
   const [name = ''] = subject.split(':')
   const pieces = new Set([name, ...piecesOfFit(report, name)])
-  return dimensions
-    .filter((change) => pieces.has(change.piece) && change.delta !== null)
-    .toSorted((a, b) => Math.abs(b.delta ?? 0) - Math.abs(a.delta ?? 0))
-    .slice(0, 3)
-    .map((change) => `${change.what} of ${change.piece} ${signed(change.delta ?? 0)}`)
+  return (
+    dimensions
+      .filter((change) => pieces.has(change.piece) && change.delta !== null)
+      // What a maker sets is the cause; inside and outside only follow from it.
+      .toSorted(
+        (a, b) =>
+          Number(isConsequence(a)) - Number(isConsequence(b)) || Math.abs(b.delta ?? 0) - Math.abs(a.delta ?? 0),
+      )
+      .filter((change, _index, all) => !isConsequence(change) || all.every(isConsequence))
+      .slice(0, 3)
+      .map((change) => `${change.what} of ${change.piece} ${signed(change.delta ?? 0)}`)
+  )
 }
 
 export const signed = (mm: number): string => `${mm < 0 ? '−' : '+'}${String(Number(Math.abs(mm).toFixed(3)))} mm`
@@ -56,6 +66,7 @@ const order: readonly Flip[] = [
   'newly-warning',
   'added',
   'newly-waived',
+  'no-longer-judged',
   'removed',
   'now-passing',
   'milder',
