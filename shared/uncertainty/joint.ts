@@ -13,7 +13,9 @@ export interface Condition {
 const negligible = 1e-7
 /** Bounds closer than this need no integration. */
 const closeEnough = 1e-4
-const points = 1024
+/** Points of the even spread; more where a condition shares all its sources and is a step, not a slope. */
+const smoothPoints = 1024
+const steppedPoints = 8192
 const tableSize = 129
 
 interface Open {
@@ -78,7 +80,11 @@ function integrate(open: readonly Condition[]): number {
       else known.count += 1
     }
   }
-  const shared = [...uses.values()].filter((use) => use.count > 1).map((use) => use.source)
+  // In the order of their names, so that the order of conditions changes nothing.
+  const shared = [...uses.values()]
+    .filter((use) => use.count > 1)
+    .map((use) => use.source)
+    .toSorted((a, b) => (a.name < b.name ? -1 : 1))
   const isShared = new Set(shared.map((source) => source.name))
   const prepared: readonly Prepared[] = open.map(({ dimension, atLeast }) => {
     const own = { nominal: 0, sources: dimension.sources.filter((source) => !isShared.has(source.name)) }
@@ -93,6 +99,10 @@ function integrate(open: readonly Condition[]): number {
       nominal: dimension.nominal,
     }
   })
+  const hasStep = open.some(({ dimension }) =>
+    dimension.sources.every((source) => source.halfWidth === 0 || isShared.has(source.name)),
+  )
+  const points = hasStep ? steppedPoints : smoothPoints
   const steps = shared.map((_, index) => stepOf(index))
   const values = new Float64Array(shared.length)
   let total = 0
