@@ -1,6 +1,9 @@
 import type { NamedSize } from '../template/template-model.ts'
 
-const inches = (length: number, width: number): NamedSize => ({ length: length * 25.4, width: width * 25.4 })
+const inches = (length: number, width: number): NamedSize => ({
+  length: (length * 127) / 5,
+  width: (width * 127) / 5,
+})
 
 /** ISO 216 A, B and C sizes, 0 to 10, long side first, mm (secondary source, agreeing with readings of DIN 476 and 678). */
 const isoSeries = {

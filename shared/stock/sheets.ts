@@ -1,6 +1,7 @@
 import type { NamedSize } from '../template/template-model.ts'
 
-const inches = (length: number, width: number): NamedSize => ({ length: length * 25.4, width: width * 25.4 })
+/** Millimetres of whole and half inches, exact: 127 fifths each. */
+const inches = (length: number, width: number): NamedSize => ({ length: (length * 127) / 5, width: (width * 127) / 5 })
 
 /** Sheets by the names they are sold under. ISO 216 sizes (secondary source); US sheets published; 12 x 12 in trade custom. */
 const sheets: Readonly<Record<string, NamedSize>> = {

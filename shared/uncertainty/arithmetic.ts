@@ -19,19 +19,30 @@ export const source = (
   shape,
 })
 
+const times = (of: Source, factor: number): Source =>
+  factor === 1 ? of : { name: of.name, coefficient: of.coefficient * factor, halfWidth: of.halfWidth, shape: of.shape }
+
+const describe = ({ shape, halfWidth }: Source): string => `${shape} ±${String(halfWidth)}`
+
 /** Adds a source to a list in which every name stands once. @throws where the same name carries another half-width or shape */
 function collect(into: Source[], next: Source, factor: number): void {
-  const coefficient = next.coefficient * factor
   for (let index = 0; index < into.length; index += 1) {
     const known = into[index]
     if (known === undefined || known.name !== next.name) continue
     if (known.shape !== next.shape || Math.abs(known.halfWidth - next.halfWidth) > 1e-9) {
-      throw new Error(`source ${next.name} has two half-widths or shapes`)
+      throw new Error(
+        `source ${next.name} is given as ${describe(known)} and as ${describe(next)}; one name is one source`,
+      )
     }
-    into[index] = { ...known, coefficient: known.coefficient + coefficient }
+    into[index] = {
+      name: known.name,
+      coefficient: known.coefficient + next.coefficient * factor,
+      halfWidth: known.halfWidth,
+      shape: known.shape,
+    }
     return
   }
-  into.push(factor === 1 ? next : { ...next, coefficient })
+  into.push(times(next, factor))
 }
 
 const alive = (sources: readonly Source[]): readonly Source[] =>
@@ -48,30 +59,34 @@ export function dimension(nominal: number, sources: readonly Source[]): Dimensio
 
 /** Σ of dimensions times factors, coefficients added by source name. */
 function combine(terms: readonly (readonly [Dimension, number])[], constantPart = 0): Dimension {
-  const merged: Source[] = []
+  let merged: Source[] | null = null
   let nominal = constantPart
   for (const [term, factor] of terms) {
     nominal += term.nominal * factor
-    for (const entry of term.sources) collect(merged, entry, factor)
+    if (merged === null) merged = term.sources.map((entry) => times(entry, factor))
+    else for (const entry of term.sources) collect(merged, entry, factor)
   }
-  return { nominal, sources: alive(merged) }
+  return { nominal, sources: alive(merged ?? []) }
 }
 
+/** Sum of dimensions; sources of one name are added up. */
 export const add = (...dimensions: readonly Dimension[]): Dimension =>
   combine(dimensions.map((term) => [term, 1] as const))
 
+/** One dimension less another; what they share cancels as far as their coefficients agree. */
 export const subtract = (from: Dimension, less: Dimension): Dimension =>
   combine([
     [from, 1],
     [less, -1],
   ])
 
+/** A dimension times a number. */
 export const scale = (of: Dimension, factor: number): Dimension => combine([[of, factor]])
 
 /** The same dimension with its nominal moved. */
 export const shift = (of: Dimension, by: number): Dimension => ({ nominal: of.nominal + by, sources: of.sources })
 
-/** Product of two dimensions, linearised at the nominal. */
+/** Product of two dimensions, linearised at the nominal: what is of second order in the sources is left out. */
 export const multiply = (a: Dimension, b: Dimension): Dimension =>
   combine(
     [
