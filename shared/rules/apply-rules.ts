@@ -22,7 +22,28 @@ export function waives(waiver: Waiver, rule: string, subject: string): boolean {
 /** A waiver holds through its last day. */
 export const isInForce = (waiver: Waiver, asOf: string): boolean => asOf <= waiver.until
 
-function verdictOf(judged: JudgedSet, rule: Rule, level: Exclude<RuleLevel, 'off'>, finding: Finding): Verdict {
+type PlaceOf = JudgedSet['set']['placeOf']
+
+/** Places by path, each looked up once: many rules point at the same piece. */
+function rememberPlaces(placeOf: PlaceOf): PlaceOf {
+  const known = new Map<string, ReturnType<PlaceOf>>()
+  return (path) => {
+    const key = path.join('\n')
+    const found = known.get(key)
+    if (found !== undefined) return found
+    const place = placeOf(path)
+    known.set(key, place)
+    return place
+  }
+}
+
+function verdictOf(
+  judged: JudgedSet,
+  rule: Rule,
+  level: Exclude<RuleLevel, 'off'>,
+  finding: Finding,
+  placeOf: PlaceOf,
+): Verdict {
   const status = statusUnder(finding, level)
   const waiver =
     status === 'warn' || status === 'fail'
@@ -38,7 +59,7 @@ function verdictOf(judged: JudgedSet, rule: Rule, level: Exclude<RuleLevel, 'off
     level,
     measure: finding.measure,
     message: finding.message,
-    at: judged.set.placeOf(finding.path),
+    at: placeOf(finding.path),
     waiver: waiver === undefined ? null : { reason: waiver.reason, until: waiver.until },
     fix: null,
   }
@@ -64,11 +85,13 @@ function crashed(judged: JudgedSet, rule: Rule, level: Exclude<RuleLevel, 'off'>
 /** Runs rules in order over a judged set: a verdict for every subject each of them judged. */
 export function applyRules(judged: JudgedSet, rules: readonly Rule[]): readonly Verdict[] {
   const verdicts: Verdict[] = []
+  const placeOf = rememberPlaces(judged.set.placeOf)
   for (const rule of rules) {
     const level = judged.set.tokens.checks.get(rule.id) ?? rule.level
     if (level === 'off') continue
     try {
-      for (const finding of rule.judge(judged, verdicts)) verdicts.push(verdictOf(judged, rule, level, finding))
+      for (const finding of rule.judge(judged, verdicts))
+        verdicts.push(verdictOf(judged, rule, level, finding, placeOf))
     } catch (error) {
       verdicts.push(crashed(judged, rule, level, error))
     }

@@ -36,6 +36,12 @@ export const ruleLimits = {
     'common practice',
     'Up to here the best way of cutting is searched for; beyond it the best way in two stages is taken.',
   ),
+  pinwheelSearched: entry(
+    6,
+    'pieces a sheet',
+    'common practice',
+    'Up to here a way of cutting that only a knife can follow is looked for; with more pieces it seldom gains one.',
+  ),
   familySizeNear: entry(0.05, 'mm', 'common practice', 'Sizes nearer than this are one size.'),
   addsUpWithin: entry(0.05, 'mm', 'common practice', 'Measures that miss their sum by less than this add up.'),
 } as const satisfies Record<string, ModelDefault>

@@ -1,10 +1,11 @@
 import type { JudgedAxis } from '../../assembly/judge-axis.ts'
+import type { JudgedFit } from '../../assembly/judge-fit.ts'
 import type { Measure } from '../../pieces/folded-piece.ts'
 import { worstCase } from '../../uncertainty/moments.ts'
 import { oncePerSet } from '../once-per-set.ts'
 
 /** Every measure makers set, by the name of its source. */
-export const measureById = oncePerSet((judged): ReadonlyMap<string, Measure> => {
+const measureById = oncePerSet((judged): ReadonlyMap<string, Measure> => {
   const measures = new Map<string, Measure>()
   for (const piece of judged.pieces.values())
     for (const measure of piece.measures) if (!measures.has(measure.id)) measures.set(measure.id, measure)
@@ -17,13 +18,31 @@ export interface MarkOfAxis {
   readonly coefficient: number
 }
 
-/** The measures a clearance depends on; printed pieces have none. */
-export function marksOf(axis: JudgedAxis, measures: ReadonlyMap<string, Measure>): readonly MarkOfAxis[] {
-  return axis.clearance.clearance.sources.flatMap((source) => {
-    const measure = source.halfWidth === 0 ? measures.get(source.name) : undefined
-    return measure === undefined ? [] : [{ measure, coefficient: source.coefficient }]
-  })
+/** An axis that depends on measures, with them. */
+export interface MarkedAxis {
+  readonly axis: JudgedAxis
+  readonly marks: readonly MarkOfAxis[]
 }
+
+function marksOf(axis: JudgedAxis, measures: ReadonlyMap<string, Measure>): readonly MarkOfAxis[] {
+  const marks: MarkOfAxis[] = []
+  for (const source of axis.clearance.clearance.sources) {
+    const measure = source.halfWidth === 0 ? measures.get(source.name) : undefined
+    if (measure !== undefined) marks.push({ measure, coefficient: source.coefficient })
+  }
+  return marks
+}
+
+/** The axes of every fit that depend on measures makers set; printed pieces have none, and their fits are left out. */
+export const markedFits = oncePerSet((judged): ReadonlyMap<JudgedFit, readonly MarkedAxis[]> => {
+  const measures = measureById(judged)
+  const marked = new Map<JudgedFit, readonly MarkedAxis[]>()
+  for (const fit of judged.fits) {
+    const axes = fit.axes.map((axis) => ({ axis, marks: marksOf(axis, measures) }))
+    if (axes.some(({ marks }) => marks.length > 0)) marked.set(fit, axes)
+  }
+  return marked
+})
 
 /**
  * Whether an axis could fail at all when its clearance is moved, by the worst case: saves working out shares that are none.

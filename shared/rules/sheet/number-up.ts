@@ -109,21 +109,28 @@ export interface NumberUp {
   readonly isSearched: boolean
 }
 
+/** Most pieces by area up to which a way is looked for. */
+export interface Effort {
+  readonly guillotine: number
+  readonly knife: number
+}
+
 /**
  * How many pieces a sheet yields, each turned as suits.
- * @param searched most pieces by area up to which the best way is searched for
+ * @param effort how far the best way is searched for
  * @see physics J (derived; a 5 × 7 in piece on 12 × 12 in: guillotine 3, knife 4)
  */
-export function numberUp(piece: Rectangle, sheet: Rectangle, searched: number): NumberUp {
+export function numberUp(piece: Rectangle, sheet: Rectangle, effort: Effort): NumberUp {
   const long = Math.max(sheet.length, sheet.width)
   const short = Math.min(sheet.length, sheet.width)
   const byArea = Math.floor((long * short) / (piece.length * piece.width) + 1e-9)
-  if (byArea > searched) {
+  if (byArea > effort.guillotine) {
     const count = inTwoStages(piece, long, short)
     return { guillotine: count, knife: count, isSearched: false }
   }
   const table = guillotineTable(piece, long, short)
   const guillotine = table.counts.at(-1)?.at(-1) ?? 0
-  const knife = guillotine >= byArea ? guillotine : Math.max(guillotine, pinwheel(table, long, short, byArea))
+  const isSettled = guillotine >= byArea || byArea > effort.knife
+  const knife = isSettled ? guillotine : Math.max(guillotine, pinwheel(table, long, short, byArea))
   return { guillotine, knife, isSearched: true }
 }

@@ -3,7 +3,7 @@ import type { JudgedFit } from '../../../assembly/judge-fit.ts'
 import type { JudgedSet } from '../../../assembly/judge-set.ts'
 import type { Finding, Rule } from '../../rule.ts'
 import { inSetUnits, listInWords, putInWords } from '../../wording.ts'
-import { marksOf, mayFailAt, measureById, type MarkOfAxis } from '../marks.ts'
+import { markedFits, mayFailAt, type MarkedAxis, type MarkOfAxis } from '../marks.ts'
 
 /** A measure and the mark it is mistaken for. */
 interface Misreading extends MarkOfAxis {
@@ -14,9 +14,9 @@ const failsAt = (judged: JudgedSet, axis: JudgedAxis, shift: number): boolean =>
   mayFailAt(axis, shift) && judgeAxis(axis.clearance, axis.give, judged.set.tokens, 1, shift).verdict === 'fail'
 
 /** Measures of an axis whose misreading by one mark makes it fail, on either side. */
-function misreadingsOf(judged: JudgedSet, axis: JudgedAxis): readonly Misreading[] {
+function misreadingsOf(judged: JudgedSet, { axis, marks: all }: MarkedAxis): readonly Misreading[] {
   const { ruler } = judged.set.tokens
-  const marks = marksOf(axis, measureById(judged)).map((mark) => ({
+  const marks = all.map((mark) => ({
     ...mark,
     step: Math.abs(mark.coefficient) * ruler[mark.measure.grid],
   }))
@@ -33,39 +33,33 @@ function misreadingsOf(judged: JudgedSet, axis: JudgedAxis): readonly Misreading
   return found
 }
 
-function judgeFitMarks(judged: JudgedSet, fit: JudgedFit): readonly Finding[] {
-  const measures = measureById(judged)
-  if (!fit.axes.some((axis) => marksOf(axis, measures).length > 0)) return []
+function judgeFitMarks(judged: JudgedSet, fit: JudgedFit, axes: readonly MarkedAxis[]): Finding {
   const common = { subject: fit.fit.id, path: ['fits', fit.fit.id] }
   const thing = `${putInWords(fit)} ${fit.fit.relation} ${fit.fit.to}`
   if (fit.verdict === 'fail')
-    return [
-      {
-        ...common,
-        severity: 'unchecked',
-        measure: null,
-        message: `${thing} fails as drawn; which marks matter is asked once it does not.`,
-      },
-    ]
+    return {
+      ...common,
+      severity: 'unchecked',
+      measure: null,
+      message: `${thing} fails as drawn; which marks matter is asked once it does not.`,
+    }
   const byMeasure = new Map<string, Misreading>()
-  for (const axis of fit.axes)
+  for (const axis of axes)
     for (const misreading of misreadingsOf(judged, axis))
       if (!byMeasure.has(misreading.measure.id)) byMeasure.set(misreading.measure.id, misreading)
   const words = [...byMeasure.values()].map(
     ({ measure, read }) =>
       `${measure.what} of ${measure.piece} (${inSetUnits(judged, read)} for ${inSetUnits(judged, measure.nominal)})`,
   )
-  return [
-    {
-      ...common,
-      severity: words.length === 0 ? 'pass' : 'info',
-      measure: { actual: words.length, limit: 0, sense: 'at-most', unit: 'count' },
-      message:
-        words.length === 0
-          ? `${thing} survives any one measure misread by one mark.`
-          : `${thing} fails if one measure is misread by one mark: ${listInWords(words)}. Say so in the steps, or leave more clearance.`,
-    },
-  ]
+  return {
+    ...common,
+    severity: words.length === 0 ? 'pass' : 'info',
+    measure: { actual: words.length, limit: 0, sense: 'at-most', unit: 'count' },
+    message:
+      words.length === 0
+        ? `${thing} survives any one measure misread by one mark.`
+        : `${thing} fails if one measure is misread by one mark: ${listInWords(words)}. Say so in the steps, or leave more clearance.`,
+  }
 }
 
 export const oneMarkRule: Rule = {
@@ -78,5 +72,5 @@ export const oneMarkRule: Rule = {
     source: 'The clearance moved by what one mark of the ruler does to it, each measure by itself, and judged again.',
   },
   remedy: 'Point out the measure in the steps, or leave more clearance there.',
-  judge: (judged) => judged.fits.flatMap((fit) => judgeFitMarks(judged, fit)),
+  judge: (judged) => [...markedFits(judged)].map(([fit, axes]) => judgeFitMarks(judged, fit, axes)),
 }

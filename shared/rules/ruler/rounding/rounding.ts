@@ -7,7 +7,7 @@ import { roundToGrid } from '../../../units/grid.ts'
 import type { Ruler, RulerUnit } from '../../../units/units.ts'
 import type { Finding, Rule } from '../../rule.ts'
 import { acrossInWords, inSetUnits, listInWords, putInWords } from '../../wording.ts'
-import { marksOf, mayFailAt, measureById, type MarkOfAxis } from '../marks.ts'
+import { markedFits, mayFailAt, type MarkedAxis, type MarkOfAxis } from '../marks.ts'
 
 const usualRulers: Readonly<Record<RulerUnit, Ruler>> = {
   mm: { cut: languageDefaults.rulerMetric.value, score: languageDefaults.rulerMetric.value },
@@ -29,11 +29,9 @@ const roundingOf = ({ measure, coefficient }: MarkOfAxis, ruler: Ruler): number 
   coefficient * (roundToGrid(measure.nominal, ruler[measure.grid]) - measure.nominal)
 
 /** Axes of a fit that fail once every measure is rounded to the marks of a unit. */
-function failuresIn(judged: JudgedSet, fit: JudgedFit, unit: RulerUnit): readonly Moved[] {
+function failuresIn(judged: JudgedSet, axes: readonly MarkedAxis[], unit: RulerUnit): readonly Moved[] {
   const ruler = rulerFor(judged, unit)
-  const measures = measureById(judged)
-  return fit.axes.flatMap((axis) => {
-    const marks = marksOf(axis, measures)
+  return axes.flatMap(({ axis, marks }) => {
     const shift = marks.reduce((sum, mark) => sum + roundingOf(mark, ruler), 0)
     if (Math.abs(shift) < 1e-9 || !mayFailAt(axis, shift)) return []
     const moved = judgeAxis(axis.clearance, axis.give, judged.set.tokens, 1, shift)
@@ -56,34 +54,28 @@ function failureInWords(judged: JudgedSet, { unit, axis, shift, marks }: Moved):
   return `in ${unit === 'in' ? 'inches' : 'millimetres'} (${grids}) ${acrossInWords(axis.clearance.axis)}, where ${inSetUnits(judged, nominal)} becomes ${inSetUnits(judged, nominal + shift)}: ${listInWords(worst, 2)}`
 }
 
-function judgeRounding(judged: JudgedSet, fit: JudgedFit): readonly Finding[] {
-  const measures = measureById(judged)
-  if (!fit.axes.some((axis) => marksOf(axis, measures).length > 0)) return []
+function judgeRounding(judged: JudgedSet, fit: JudgedFit, axes: readonly MarkedAxis[]): Finding {
   const common = { subject: fit.fit.id, path: ['fits', fit.fit.id] }
   const thing = `${putInWords(fit)} ${fit.fit.relation} ${fit.fit.to}`
   if (fit.verdict === 'fail')
-    return [
-      {
-        ...common,
-        severity: 'unchecked',
-        measure: null,
-        message: `${thing} fails as drawn; rounding is asked about once it does not.`,
-      },
-    ]
-  const failures = (['mm', 'in'] as const).flatMap((unit) => failuresIn(judged, fit, unit))
+    return {
+      ...common,
+      severity: 'unchecked',
+      measure: null,
+      message: `${thing} fails as drawn; rounding is asked about once it does not.`,
+    }
+  const failures = (['mm', 'in'] as const).flatMap((unit) => failuresIn(judged, axes, unit))
   const units = new Set(failures.map((failure) => failure.unit))
   const firstOfEach = [...units].flatMap((unit) => failures.find((failure) => failure.unit === unit) ?? [])
-  return [
-    {
-      ...common,
-      severity: failures.length === 0 ? 'pass' : 'warn',
-      measure: { actual: units.size, limit: 0, sense: 'at-most', unit: 'count' },
-      message:
-        failures.length === 0
-          ? `${thing} holds when measures are rounded to marks, in millimetres and in inches.`
-          : `${thing} fails once measures are rounded to marks ${listInWords(firstOfEach.map((failure) => failureInWords(judged, failure)))}. Give makers one unit only, or design sizes of their own for the other.`,
-    },
-  ]
+  return {
+    ...common,
+    severity: failures.length === 0 ? 'pass' : 'warn',
+    measure: { actual: units.size, limit: 0, sense: 'at-most', unit: 'count' },
+    message:
+      failures.length === 0
+        ? `${thing} holds when measures are rounded to marks, in millimetres and in inches.`
+        : `${thing} fails once measures are rounded to marks ${listInWords(firstOfEach.map((failure) => failureInWords(judged, failure)))}. Give makers one unit only, or design sizes of their own for the other.`,
+  }
 }
 
 export const roundingRule: Rule = {
@@ -97,5 +89,5 @@ export const roundingRule: Rule = {
       'Every measure rounded to the nearest mark of each unit and the clearance judged again. Marks of 1 mm, 1/16 and 1/8 in are common practice.',
   },
   remedy: 'Give makers the measures of one unit only, or design sizes of their own for the other.',
-  judge: (judged) => judged.fits.flatMap((fit) => judgeRounding(judged, fit)),
+  judge: (judged) => [...markedFits(judged)].map(([fit, axes]) => judgeRounding(judged, fit, axes)),
 }

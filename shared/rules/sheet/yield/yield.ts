@@ -6,6 +6,8 @@ import { placementIn } from '../fits-turned.ts'
 import { numberUp } from '../number-up.ts'
 import { cutRectangles, type CutRectangle } from '../sheet-of.ts'
 
+const effort = { guillotine: ruleLimits.yieldSearched.value, knife: ruleLimits.pinwheelSearched.value }
+
 function judgePiece(judged: JudgedSet, name: string, cut: CutRectangle | undefined): readonly Finding[] {
   if (cut === undefined) return []
   const { rectangle, sheet, blank } = cut
@@ -15,7 +17,7 @@ function judgePiece(judged: JudgedSet, name: string, cut: CutRectangle | undefin
   const placement = placementIn(rectangle, usable)
   // A blank that does not go on the sheet at all is judged by another rule.
   if (placement === null) return []
-  const counted = numberUp(rectangle, usable, ruleLimits.yieldSearched.value)
+  const counted = numberUp(rectangle, usable, effort)
   const guillotine = counted.guillotine
   const knife = Math.max(1, counted.knife)
   const make = judged.makes.get(name) ?? 1
