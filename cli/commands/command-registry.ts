@@ -15,6 +15,11 @@ export const commandEntries: readonly CommandEntry[] = [
     load: async () => (await import('./size.ts')).sizeCommand,
   },
   {
+    name: 'export',
+    summary: 'write printable templates, drawings for machines, and the steps',
+    load: async () => (await import('./export.ts')).exportCommand,
+  },
+  {
     name: 'compare',
     summary: 'tell what changed between two sets',
     load: async () => (await import('./compare.ts')).compareCommand,

@@ -36,7 +36,7 @@ export interface PagePlan {
 
 const headHeight: Millimetres = 13
 const footHeight: Millimetres = 19
-const barStrip: Millimetres = 9
+const barStrip: Millimetres = 10
 const small: Millimetres = 2.3
 
 const sizeOf = (frame: PageFrame, isTurned: boolean): { readonly width: Millimetres; readonly height: Millimetres } =>
@@ -60,7 +60,9 @@ function headMarks(frame: PageFrame, plan: PagePlan, number: number, count: numb
   const top = height - frame.margin
   const across = right - left
   const pageText = `page ${String(number)} of ${String(count)}`
-  const below = [frame.title, frame.version, `digest ${frame.digest}`].filter((part) => part !== '').join(' · ')
+  const below = [frame.title, frame.version, frame.digest === '' ? '' : `digest ${frame.digest}`]
+    .filter((part) => part !== '')
+    .join(' · ')
   const mark = frame.mark === null ? '' : `${frame.mark} · `
   const titleText = clipText(plan.title, across * 0.6, 4)
   const titleWidth = textWidth(titleText, 4) * 1.02
@@ -126,8 +128,15 @@ function draftMarks(frame: PageFrame, isTurned: boolean): readonly Mark[] {
   ]
 }
 
-/** Pages numbered and framed: head, scale bars in both directions, foot, and the stamp of a draft. */
-export function framePages(frame: PageFrame, plans: readonly PagePlan[]): readonly Page[] {
+/**
+ * Pages numbered and framed: head, scale bars in both directions, foot, and the stamp of a draft.
+ * @param numbering pages before these and in all, where they are part of a longer document
+ */
+export function framePages(
+  frame: PageFrame,
+  plans: readonly PagePlan[],
+  numbering: { readonly before: number; readonly total: number } = { before: 0, total: plans.length },
+): readonly Page[] {
   return plans.map((plan, index) => {
     const { width, height } = sizeOf(frame, plan.isTurned)
     return {
@@ -136,7 +145,7 @@ export function framePages(frame: PageFrame, plans: readonly PagePlan[]): readon
       title: plan.title,
       trim: plan.trim ?? null,
       marks: [
-        ...headMarks(frame, plan, index + 1, plans.length),
+        ...headMarks(frame, plan, numbering.before + index + 1, numbering.total),
         ...plan.marks,
         ...draftMarks(frame, plan.isTurned),
         ...footMarks(frame, plan.isTurned),

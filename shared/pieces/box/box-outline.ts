@@ -96,6 +96,16 @@ export const trayTabs = (shape: TrayShape): readonly TrayTab[] =>
 const notchRadius = (wall: Millimetres, scored: Millimetres): Millimetres =>
   Math.min(thumbRadius, 0.6 * wall, scored / 6)
 
+/** Radius of the thumb notches of a tray, which lie in the two walls that tabs are glued to. */
+export function thumbNotchRadius(
+  form: { readonly walls: WallsGiven; readonly scored: { readonly length: Millimetres; readonly width: Millimetres } },
+  at: TabsGiven['at'],
+): Millimetres {
+  return at === 'ends'
+    ? notchRadius(Math.min(...form.walls.width), form.scored.length)
+    : notchRadius(Math.min(...form.walls.length), form.scored.width)
+}
+
 /** A half-round bite out of a wall's rim, between the rim's two ends; the rim runs counter-clockwise. */
 function notchIn(from: Point, to: Point, wall: Millimetres): readonly Point[] {
   const middle = along(from, to, 0.5)

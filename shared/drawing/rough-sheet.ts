@@ -6,14 +6,14 @@ import type { Blank } from '../pieces/blank.ts'
 import type { Millimetres } from '../units/units.ts'
 
 /** The rectangle a blank is first cut as, and what meets its edges. */
-export interface Sheet {
+export interface RoughSheet {
   /** Corners counter-clockwise on the blank, the lowest first. */
   readonly corners: Polygon
   readonly length: Millimetres
   readonly width: Millimetres
   /** Degrees by which it is turned on the blank: 45 for a square standing on a corner. */
   readonly turn: 0 | 45
-  readonly edges: readonly SheetEdge[]
+  readonly edges: readonly RoughEdge[]
 }
 
 /** Something to mark on an edge, measured from the edge's start. */
@@ -23,7 +23,7 @@ export interface EdgeMark {
   readonly name: string
 }
 
-export interface SheetEdge {
+export interface RoughEdge {
   readonly name: string
   readonly line: Segment
   readonly length: Millimetres
@@ -50,7 +50,7 @@ function crossing(score: Segment, edge: Segment): Point | null {
   const e = { x: edge.to.x - edge.from.x, y: edge.to.y - edge.from.y }
   const area = d.x * e.y - d.y * e.x
   if (Math.abs(area) < 1e-9) return null
-  const share = (d.x * (score.from.y - edge.from.y) - d.y * (score.from.x - edge.from.x)) / -area
+  const share = (d.x * (score.from.y - edge.from.y) - d.y * (score.from.x - edge.from.x)) / area
   if (share < -1e-9 || share > 1 + 1e-9) return null
   return { x: edge.from.x + share * e.x, y: edge.from.y + share * e.y }
 }
@@ -84,14 +84,14 @@ const edgeNames = {
 } as const
 
 /** The sheet to cut for a blank: the smaller of its upright rectangle and the one standing on a corner. */
-export function sheetOf(blank: Blank): Sheet {
+export function roughSheetOf(blank: Blank): RoughSheet {
   const areaAt = (turn: 0 | 45): number => {
     const bounds = boundsOf(turn === 0 ? blank.outline : movePolygon(blank.outline, rotation(-turn)))
     return widthOf(bounds) * heightOf(bounds)
   }
   const turn = areaAt(45) < areaAt(0) * 0.999 ? 45 : 0
   const corners = rectangleAt(blank.outline, turn)
-  const edges = corners.map((from, index): SheetEdge => {
+  const edges = corners.map((from, index): RoughEdge => {
     const to = corners[(index + 1) % corners.length] ?? from
     const edge = { from, to }
     return {
