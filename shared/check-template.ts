@@ -4,7 +4,7 @@ import { reportPieces } from './assembly/report-pieces.ts'
 import type { CheckOptions } from './check-options.ts'
 import { engineVersion, rulesEdition } from './edition.ts'
 import { addFixes } from './fixes/add-fixes.ts'
-import { digestOf } from './report/digest.ts'
+import { canonicalJson, digestOf } from './report/digest.ts'
 import type { Report, Summary, Verdict } from './report/report.ts'
 import { applyRules } from './rules/apply-rules.ts'
 import { rules } from './rules/rule-registry.ts'
@@ -77,8 +77,8 @@ function digestOfSet(set: TemplateSet, tokens: Tokens, inputs: Report['inputs'],
       sheet: set.sheet,
       mail: set.mail,
       pieces: set.pieces,
-      fits: set.fits,
-      waivers: set.waivers,
+      fits: Object.fromEntries(set.fits.map((fit) => [fit.id, fit])),
+      waivers: set.waivers.map(({ index: _index, ...waiver }) => canonicalJson(waiver)).toSorted(),
       steps: set.steps,
     },
     inputs,
