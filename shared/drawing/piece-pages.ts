@@ -11,7 +11,7 @@ import { roomOn, type PageFrame, type PagePlan } from './page-frame.ts'
 import { placeDrawing } from './place-drawing.ts'
 import { roughSheetOf, type RoughEdge } from './rough-sheet.ts'
 import { scaleBlank } from './scale-blank.ts'
-import { clipText } from './text-width.ts'
+import { charactersIn, clipText, textWidth, wrapText } from './text-width.ts'
 import { tilePages } from './tile-pages.ts'
 
 /** A sheet as its page heads it. */
@@ -93,36 +93,39 @@ function measuringPlan(sheet: SheetToDraw, frame: PageFrame): PagePlan {
 const stripHeight: Millimetres = 18
 const stripGap: Millimetres = 9
 
-/** Edges that carry the same marks in the same order need one strip. */
-function distinctEdges(
-  edges: readonly RoughEdge[],
-): readonly { readonly edge: RoughEdge; readonly names: readonly string[] }[] {
-  const found: { edge: RoughEdge; names: string[] }[] = []
-  const reversed = (edge: RoughEdge): readonly Millimetres[] =>
-    edge.marks.map((mark) => edge.length - mark.at).reverse()
-  const isSame = (a: readonly Millimetres[], b: readonly Millimetres[]): boolean =>
-    a.length === b.length && a.every((value, index) => Math.abs(value - (b[index] ?? NaN)) < 0.05)
+interface Strip {
+  readonly edge: RoughEdge
+  /** Where it is laid: which corner its left end goes to, and along which edges. */
+  readonly uses: readonly string[]
+}
+
+const sameMarks = (a: readonly Millimetres[], b: readonly Millimetres[]): boolean =>
+  a.length === b.length && a.every((value, index) => Math.abs(value - (b[index] ?? NaN)) < 0.05)
+
+/** Edges that carry the same marks, from one end or from the other, need one strip. */
+function distinctEdges(edges: readonly RoughEdge[]): readonly Strip[] {
+  const found: { edge: RoughEdge; uses: string[] }[] = []
   for (const edge of edges) {
-    const twin = found.find(({ edge: other }) => {
-      if (Math.abs(other.length - edge.length) > 0.05) return false
-      const marks = other.marks.map((mark) => mark.at)
-      return (
-        isSame(
-          marks,
-          edge.marks.map((mark) => mark.at),
-        ) || isSame(marks, reversed(edge))
+    const forwards = edge.marks.map((mark) => mark.at)
+    const backwards = edge.marks.map((mark) => edge.length - mark.at).reverse()
+    const isAlike = (other: RoughEdge, marks: readonly Millimetres[]): boolean =>
+      Math.abs(other.length - edge.length) < 0.05 &&
+      sameMarks(
+        other.marks.map((mark) => mark.at),
+        marks,
       )
-    })
-    if (twin === undefined) found.push({ edge, names: [edge.name] })
-    else twin.names.push(edge.name)
+    const twin =
+      found.find(({ edge: other }) => isAlike(other, forwards)) ??
+      found.find(({ edge: other }) => isAlike(other, backwards))
+    if (twin === undefined) found.push({ edge, uses: [`${edge.from}, ${edge.name}`] })
+    else twin.uses.push(`${isAlike(twin.edge, forwards) ? edge.from : edge.to}, ${edge.name}`)
   }
   return found
 }
 
 /** One true-size strip, or the part of it between two lengths, its upper edge to be laid along the paper. */
 function stripMarks(
-  edge: RoughEdge,
-  names: readonly string[],
+  { edge, uses }: Strip,
   at: Point,
   from: Millimetres,
   to: Millimetres,
@@ -132,19 +135,26 @@ function stripMarks(
   const isWhole = from === 0 && Math.abs(to - edge.length) < 1e-6
   const part = isWhole ? '' : ` · part from ${lengthText(from, frame.units)} to ${lengthText(to, frame.units)}`
   const inner = edge.marks.filter((mark) => mark.at >= from - 1e-6 && mark.at <= to + 1e-6)
-  const ticks = inner.flatMap((mark, index): Mark[] => {
+  const words = inner.map((mark) => `${mark.what} ${lengthText(mark.at, frame.units)}`)
+  const ticks = inner.flatMap((mark, index): readonly Mark[] => {
     const tick = x + mark.at - from
-    const level = y - 5.4 - (index % 3) * 3
+    const [before, after] = [inner[index - 1]?.at ?? from, inner[index + 1]?.at ?? to]
+    const wide = textWidth(words[index] ?? '', 2.3) + 1.5
+    // Figures stand on the side where the next mark leaves them room, on a level of their own where neither does.
+    const isLeft = mark.at - before > after - mark.at && mark.at - from > wide
+    const level = y - 5.4 - (Math.max(mark.at - before, after - mark.at) < wide ? (index % 3) * 3 : 0)
     return [
       line(
         'dimension',
         [
           { x: tick, y },
-          { x: tick, y: level + 2.2 },
+          { x: tick, y: y - 6 },
         ],
         { weight: 'plain' },
       ),
-      text('dimension', { x: tick + 0.6, y: level }, `${mark.what} ${lengthText(mark.at, frame.units)}`, 2.3),
+      text('dimension', { x: isLeft ? tick - 0.6 : tick + 0.6, y: level }, words[index] ?? '', 2.3, {
+        anchor: isLeft ? 'end' : 'start',
+      }),
     ]
   })
   const ends: readonly [Millimetres, boolean][] = [
@@ -153,17 +163,14 @@ function stripMarks(
   ]
   return [
     line('cut', rectangle(x, y - stripHeight, x + to - from, y), { isClosed: true }),
-    text(
-      'legend',
-      { x: x + 1, y: y - stripHeight + 1.4 },
-      clipText(
-        `this edge up, along the ${names.join(' and the ')} · ${lengthText(edge.length, frame.units)} long${part}`,
-        to - from - 2,
-        2.5,
+    ...wrapText(
+      `This edge along the paper, ${lengthText(edge.length, frame.units)}${part}. Left end at the ${uses.join('; ')}.`,
+      charactersIn(to - from - 2, 2.3),
+    )
+      .slice(0, 2)
+      .map((words, index) =>
+        text('legend', { x: x + 1, y: y - stripHeight + 4.4 - index * 3 }, words, 2.3, { role: 'paragraph' }),
       ),
-      2.5,
-      { role: 'paragraph' },
-    ),
     ...ticks,
     ...ends.flatMap(([tick, isJoin]): readonly Mark[] =>
       isJoin
@@ -185,11 +192,11 @@ function stripPages(sheet: SheetToDraw, frame: PageFrame): readonly PagePlan[] {
   const isTurned = longest > upright.right - upright.left && frame.size.height > frame.size.width
   const room = roomOn(frame, isTurned)
   const across = room.right - room.left
-  const strips = distinctEdges(rough.edges).flatMap(({ edge, names }) => {
+  const strips = distinctEdges(rough.edges).flatMap((strip) => {
+    const { edge } = strip
     const parts = Math.ceil(edge.length / across - 1e-9)
     return Array.from({ length: parts }, (_, index) => ({
-      edge,
-      names,
+      strip,
       from: (edge.length * index) / parts,
       to: (edge.length * (index + 1)) / parts,
     }))
@@ -199,8 +206,9 @@ function stripPages(sheet: SheetToDraw, frame: PageFrame): readonly PagePlan[] {
   for (let start = 0; start < strips.length; start += perPage) {
     const marks = strips
       .slice(start, start + perPage)
-      .flatMap(({ edge, names, from, to }, index) =>
-        stripMarks(edge, names, { x: room.left, y: room.top - 6 - index * (stripHeight + stripGap) }, from, to, frame),
+
+      .flatMap(({ strip, from, to }, index) =>
+        stripMarks(strip, { x: room.left, y: room.top - 6 - index * (stripHeight + stripGap) }, from, to, frame),
       )
     pages.push({
       title: `${sheet.blank.name}: marking strips`,
@@ -212,7 +220,7 @@ function stripPages(sheet: SheetToDraw, frame: PageFrame): readonly PagePlan[] {
           'legend',
           { x: room.left, y: room.top - 2 },
           clipText(
-            'Lay the upper edge of a strip level with the edge of the paper, inside up, and mark at the ticks.',
+            'Lay the upper edge of a strip against the edge of the paper, inside up, its left end at the corner it names, and mark at the ticks.',
             across,
             2.6,
           ),

@@ -26,6 +26,9 @@ export interface EdgeMark {
 export interface RoughEdge {
   readonly name: string
   readonly line: Segment
+  /** Corners it runs between. */
+  readonly from: string
+  readonly to: string
   readonly length: Millimetres
   readonly marks: readonly EdgeMark[]
 }
@@ -70,17 +73,22 @@ function marksOn(blank: Blank, edge: Segment): readonly EdgeMark[] {
       .map((p) => ({ at: along(p), what: 'cut' as const, name: 'cut' })),
   )
   const found: EdgeMark[] = []
-  for (const mark of [...folds, ...cuts].sort((a, b) => a.at - b.at)) {
+  // Folds first: where a cut begins on a fold's mark, the fold is what is marked.
+  for (const mark of [...folds, ...cuts]) {
     const isEnd = mark.at < near || mark.at > long - near
-    const twin = found.find((other) => Math.abs(other.at - mark.at) < 0.05)
-    if (!isEnd && twin === undefined) found.push(mark)
+    if (!isEnd && found.every((other) => Math.abs(other.at - mark.at) >= 0.05)) found.push(mark)
   }
-  return found
+  return found.sort((a, b) => a.at - b.at)
 }
 
 const edgeNames = {
   0: ['bottom edge', 'right edge', 'top edge', 'left edge'],
   45: ['lower right edge', 'upper right edge', 'upper left edge', 'lower left edge'],
+} as const
+
+const cornerNames = {
+  0: ['lower left corner', 'lower right corner', 'upper right corner', 'upper left corner'],
+  45: ['bottom corner', 'right corner', 'top corner', 'left corner'],
 } as const
 
 /** The sheet to cut for a blank: the smaller of its upright rectangle and the one standing on a corner. */
@@ -97,6 +105,8 @@ export function roughSheetOf(blank: Blank): RoughSheet {
     return {
       name: edgeNames[turn][index] ?? 'edge',
       line: edge,
+      from: cornerNames[turn][index] ?? 'corner',
+      to: cornerNames[turn][(index + 1) % 4] ?? 'corner',
       length: Math.hypot(to.x - from.x, to.y - from.y),
       marks: marksOn(blank, edge),
     }

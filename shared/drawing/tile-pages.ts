@@ -1,5 +1,6 @@
 import { boundsOf, heightOf, widthOf, type Bounds } from '../geometry/bounds.ts'
 import type { Point, Segment } from '../geometry/shapes.ts'
+import { movePolygon, rotation } from '../geometry/transform.ts'
 import type { Millimetres } from '../units/units.ts'
 import { dashLine } from './dash-line.ts'
 import { drawBlank } from './draw-blank.ts'
@@ -8,6 +9,7 @@ import { dashFor, lineStyles } from './line-styles.ts'
 import { roomOn, type PageFrame, type PagePlan } from './page-frame.ts'
 import type { SheetToDraw } from './piece-pages.ts'
 import { placeDrawing } from './place-drawing.ts'
+import { roughSheetOf } from './rough-sheet.ts'
 
 /** How far neighbouring tiles repeat one another. */
 const overlap: Millimetres = 10
@@ -145,11 +147,15 @@ function keyPlan(tiling: Tiling, step: Point, at: Point, column: number, row: nu
 
 /** True-size tiles with overlap, match marks that lie over one another when joined, and a key plan on each. */
 export function tilePages(sheet: SheetToDraw, frame: PageFrame): readonly PagePlan[] {
-  const { left, bottom, right, top } = boundsOf(sheet.blank.outline)
+  // A square that stands on a corner takes fewer tiles lying square.
+  const { turn } = roughSheetOf(sheet.blank)
+  const { left, bottom, right, top } = boundsOf(
+    turn === 0 ? sheet.blank.outline : movePolygon(sheet.blank.outline, rotation(-turn)),
+  )
   const tiling = chooseTiling(right - left, top - bottom, frame)
   const { room, columns, rows } = tiling
   const step = { x: widthOf(room) - overlap, y: heightOf(room) - overlap }
-  const marks = drawBlank(sheet.blank, { units: frame.units }).marks
+  const marks = placeDrawing(drawBlank(sheet.blank, { units: frame.units }), { x: 0, y: 0, turn: -turn, scale: 1 })
   const pages: PagePlan[] = []
   for (let row = 0; row < rows; row += 1) {
     for (let column = 0; column < columns; column += 1) {
