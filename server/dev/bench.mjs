@@ -6,4 +6,4 @@ import { requireNode, runStep } from './steps.mjs'
 requireNode()
 installNodePackages()
 buildCommandLine()
-runStep('Measuring', process.execPath, ['--import', 'tsx', 'tests/bench/bench.ts'], { stdio: 'inherit' })
+runStep('Measuring', process.execPath, ['--expose-gc', '--import', 'tsx', 'tests/bench/bench.ts'], { stdio: 'inherit' })

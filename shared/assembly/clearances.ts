@@ -113,7 +113,7 @@ function intoTray(model: SetModel, fit: Fit, box: FoldedPiece, load: Load): FitC
   const headroom = cavity.depth === null ? null : cavity.depth.nominal - load.height.nominal
   const isDivider = load.stands && fit.stands === null
   if (isDivider) {
-    // A divider spans one axis: unturned, the one whose inside is nearest its length.
+    // A divider spans one axis, the one whose inside is nearest its length; where it is loosest it would only fall over.
     const nearest = (['width', 'length'] as const).toSorted(
       (a, b) => Math.abs(cavity[a].nominal - load.length.nominal) - Math.abs(cavity[b].nominal - load.length.nominal),
     )
@@ -121,7 +121,7 @@ function intoTray(model: SetModel, fit: Fit, box: FoldedPiece, load: Load): FitC
       fitCase: 'divider',
       load,
       headroom: null,
-      orientations: tries(fit, true).map((isTurned) => {
+      orientations: tries(fit, false).map((isTurned) => {
         const axis = nearest[isTurned ? 1 : 0] ?? 'width'
         return {
           isTurned,

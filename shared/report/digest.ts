@@ -3,14 +3,31 @@ import { bytesToHex, utf8ToBytes } from '@noble/hashes/utils.js'
 
 /** A value as JSON with the keys of every object in order, so that order of writing changes nothing. */
 export function canonicalJson(value: unknown): string {
-  if (value instanceof Map) return canonicalJson(Object.fromEntries(value))
-  if (Array.isArray(value)) return `[${value.map(canonicalJson).join(',')}]`
-  if (value !== null && typeof value === 'object') {
-    const entries = Object.entries(value).filter(([, item]) => item !== undefined)
-    entries.sort(([a], [b]) => (a < b ? -1 : a > b ? 1 : 0))
-    return `{${entries.map(([key, item]) => `${JSON.stringify(key)}:${canonicalJson(item)}`).join(',')}}`
+  if (typeof value === 'string') return JSON.stringify(value)
+  if (typeof value === 'number') return Number.isFinite(value) ? String(value) : 'null'
+  if (typeof value === 'boolean') return value ? 'true' : 'false'
+  if (value === null || typeof value !== 'object') return 'null'
+  if (Array.isArray(value)) {
+    let items = ''
+    for (const item of value as readonly unknown[])
+      items += items === '' ? canonicalJson(item) : `,${canonicalJson(item)}`
+    return `[${items}]`
   }
-  return JSON.stringify(value) ?? 'null'
+  if (value instanceof Map)
+    return canonicalObject([...(value as ReadonlyMap<string, unknown>).keys()], (key) =>
+      (value as ReadonlyMap<string, unknown>).get(key),
+    )
+  return canonicalObject(Object.keys(value), (key) => (value as Readonly<Record<string, unknown>>)[key])
+}
+
+function canonicalObject(keys: string[], valueOf: (key: string) => unknown): string {
+  let entries = ''
+  for (const key of keys.sort()) {
+    const item = valueOf(key)
+    if (item === undefined) continue
+    entries += `${entries === '' ? '' : ','}${JSON.stringify(key)}:${canonicalJson(item)}`
+  }
+  return `{${entries}}`
 }
 
 /** `sha256:` and the hexadecimal digest of a value's canonical JSON. */
