@@ -1,22 +1,25 @@
 import type { NamedSize } from '../template/template-model.ts'
+import { inchesToMillimetres } from '../units/inches.ts'
+import { isoSize } from './iso-series.ts'
 
-/** Millimetres of whole and half inches, exact: 127 fifths each. */
-const inches = (length: number, width: number): NamedSize => ({ length: (length * 127) / 5, width: (width * 127) / 5 })
+const inches = (length: number, width: number): NamedSize => ({
+  length: inchesToMillimetres(length),
+  width: inchesToMillimetres(width),
+})
 
-/** Sheets by the names they are sold under. ISO 216 sizes (secondary source); US sheets published; 12 x 12 in trade custom. */
-const sheets: Readonly<Record<string, NamedSize>> = {
-  a2: { length: 594, width: 420 },
-  a3: { length: 420, width: 297 },
-  a4: { length: 297, width: 210 },
-  a5: { length: 210, width: 148 },
+/** Sheets of no series. Letter, legal and tabloid: published tables of US sheets; 12 x 12 in: trade custom, from memory. */
+const american: Readonly<Record<string, NamedSize>> = {
   letter: inches(11, 8.5),
   legal: inches(14, 8.5),
   tabloid: inches(17, 11),
   '12x12in': inches(12, 12),
 }
 
-export const sheetNames: readonly string[] = Object.keys(sheets)
+/** Names of the sheets blanks are cut from, as they are sold. */
+export const sheetNames: readonly string[] = ['a0', 'a1', 'a2', 'a3', 'a4', 'a5', 'a6', ...Object.keys(american)]
 
-/** A sheet by name, length the larger; `null` for a name that is none. */
-export const sheetByName = (name: string): NamedSize | null =>
-  Object.hasOwn(sheets, name) ? (sheets[name] ?? null) : null
+/** A sheet by name, in millimetres, length the larger; `null` for a name that is none. */
+export function sheetByName(name: string): NamedSize | null {
+  if (/^a[0-6]$/.test(name)) return isoSize('a', Number(name.slice(1)))
+  return Object.hasOwn(american, name) ? (american[name] ?? null) : null
+}

@@ -18,14 +18,17 @@ function distance(a: string, b: string, most: number): number {
   return last[b.length] ?? most + 1
 }
 
-/** The candidate a word was probably meant to be, if one is near enough: a third of its length, at most three edits. */
+/**
+ * The candidate a word was probably meant to be, if one is near enough: a third of its length, at most three edits, and
+ * with at least one letter in common. The first of equally near ones.
+ */
 export function nearestName(word: string, candidates: Iterable<string>): string | null {
   const most = Math.min(3, Math.max(1, Math.floor(word.length / 3)))
   let best: string | null = null
   let least = most + 1
   for (const candidate of candidates) {
     const edits = distance(word.slice(0, 80), candidate, most)
-    if (edits < least) {
+    if (edits < least && edits < Math.max(word.length, candidate.length)) {
       best = candidate
       least = edits
     }

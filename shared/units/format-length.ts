@@ -1,7 +1,11 @@
 import { sameLength } from './epsilon.ts'
+import { roundToGrid } from './grid.ts'
 import type { Millimetres, Range, RulerUnit } from './units.ts'
 
 export const millimetresPerInch = 25.4
+
+/** The finest fraction of an inch that is written as one; what lies between is a decimal. Common practice on rulers. */
+const finest = 64
 
 export interface FormatOptions {
   /** Most decimals of a metric or decimal text; trailing zeros are dropped. */
@@ -29,8 +33,6 @@ function mixedFraction(count: number, denominator: number): string {
   return whole === 0 ? `${sign}${fraction}` : `${sign}${String(whole)} ${fraction}`
 }
 
-const finest = 64
-
 /** A number of millimetres in a unit: metric with just enough decimals, inches as a fraction where they are one. */
 export function formatLength(mm: Millimetres, unit: RulerUnit, options: FormatOptions = {}): string {
   const suffix = options.bare === true ? '' : ` ${unit}`
@@ -49,9 +51,9 @@ export interface Mark {
   readonly error: Millimetres
 }
 
-/** Nearest ruler mark, halves up. @see physics K (derived) */
+/** The ruler mark nearest to a length, halves up, as makers read it. @see physics K (derived) */
 export function formatMark(mm: Millimetres, grid: Millimetres, unit: RulerUnit): Mark {
-  const marked = Math.floor(mm / grid + 0.5 + 1e-9) * grid
+  const marked = roundToGrid(mm, grid)
   return { text: formatLength(marked, unit, { decimals: 3 }), mm: marked, error: marked - mm }
 }
 

@@ -1,4 +1,7 @@
-import { nearestName } from './did-you-mean.ts'
+import { millimetresPerUnit, splitUnit, unitMeant, unitNamed } from './length-units.ts'
+import { multiplied, nearestDouble, rational } from './rational.ts'
+import { notUnderstood, numberFailure, otherNotation, readNumber } from './read-number.ts'
+import { longestMeasure, quoted, refuse } from './refuse.ts'
 import type { Length, LengthUnit, Millimetres, Reading } from './units.ts'
 
 export interface ParseOptions {
@@ -7,187 +10,93 @@ export interface ParseOptions {
   readonly allowZero?: boolean
 }
 
-/** Millimetres per unit as a fraction: an inch is exactly 127/5 mm. */
-const perUnit: Readonly<Record<LengthUnit, readonly [bigint, bigint]>> = {
-  mm: [1n, 1n],
-  cm: [10n, 1n],
-  in: [127n, 5n],
-  um: [1n, 1000n],
-  mil: [127n, 5000n],
-  pt: [127n, 5000n],
-}
-
-const unitNames: Readonly<Record<string, LengthUnit>> = {
-  mm: 'mm',
-  cm: 'cm',
-  in: 'in',
-  '"': 'in',
-  '″': 'in',
-  '”': 'in',
-  um: 'um',
-  µm: 'um',
-  μm: 'um',
-  mil: 'mil',
-  pt: 'pt',
-}
-
-const vulgar: Readonly<Record<string, readonly [bigint, bigint]>> = {
-  '¼': [1n, 4n],
-  '½': [1n, 2n],
-  '¾': [3n, 4n],
-  '⅓': [1n, 3n],
-  '⅔': [2n, 3n],
-  '⅕': [1n, 5n],
-  '⅖': [2n, 5n],
-  '⅗': [3n, 5n],
-  '⅘': [4n, 5n],
-  '⅙': [1n, 6n],
-  '⅚': [5n, 6n],
-  '⅐': [1n, 7n],
-  '⅛': [1n, 8n],
-  '⅜': [3n, 8n],
-  '⅝': [5n, 8n],
-  '⅞': [7n, 8n],
-  '⅑': [1n, 9n],
-  '⅒': [1n, 10n],
-}
-const vulgarClass = `[${Object.keys(vulgar).join('')}]`
-
 const longest: Millimetres = 10_000
 
-type Failure = Extract<Reading<never>, { ok: false }>
-const refuse = (code: string, fact: string, remedy: string): Failure => ({ ok: false, code, fact, remedy })
+/** Integers and decimals, which nearly all lengths are: their digits are read without exact fractions. */
+const plain = /^(\d+)(?:\.(\d+))?(?:\s*(mm|cm|in|um|mil|pt))?$/
 
-type Fraction = readonly [bigint, bigint]
+/** With no more digits than this, digits × 127 and every power of ten needed are doubles exactly. */
+const mostPlainDigits = 13
+const powersOfTen = [1, 1e1, 1e2, 1e3, 1e4, 1e5, 1e6, 1e7, 1e8, 1e9, 1e10, 1e11, 1e12, 1e13] as const
 
-const digits = (text: string): bigint => BigInt(text)
-
-/** Integer, decimal, fraction or mixed number as an exact fraction; `null` where it is none of these. */
-function exactNumber(text: string): Fraction | null {
-  const decimal = /^(\d+)?(?:\.(\d+))?$/.exec(text)
-  if (decimal !== null && text !== '') {
-    const [, whole = '0', places = ''] = decimal
-    return [digits(`${whole}${places}`), 10n ** BigInt(places.length)]
-  }
-  const mixed = /^(?:(\d+)(?:\s+|-))?(\d+)\s*\/\s*(\d+)$/.exec(text)
-  if (mixed !== null) {
-    const [, whole = '0', top = '0', bottom = '1'] = mixed
-    return [digits(whole) * digits(bottom) + digits(top), digits(bottom)]
-  }
-  const glyph = new RegExp(`^(\\d+)?[\\s-]?(${vulgarClass})$`).exec(text)
-  const part = vulgar[glyph?.[2] ?? '']
-  if (glyph !== null && part !== undefined) return [digits(glyph[1] ?? '0') * part[1] + part[0], part[1]]
-  return null
+/** Reads a plain number: one division of two exact doubles, so correctly rounded; `null` where it is not plain. */
+function readPlain(text: string, defaultUnit: LengthUnit): Length | null {
+  const match = plain.exec(text)
+  if (match === null) return null
+  const [, whole = '', places = ''] = match
+  const scale = powersOfTen[places.length]
+  if ((whole.length > 1 && whole.startsWith('0')) || scale === undefined) return null
+  if (whole.length + places.length > mostPlainDigits) return null
+  const unit = (match[3] ?? defaultUnit) as LengthUnit
+  const [top, bottom] = millimetresPerUnit[unit]
+  return { mm: (Number(`${whole}${places}`) * top) / (scale * bottom), unit, text }
 }
-
-/** The double nearest to a fraction: scaled so that the integer quotient carries more bits than a double keeps. */
-function nearestDouble([top, bottom]: Fraction): number {
-  const direct = Number(top) / Number(bottom)
-  if (top < 2n ** 53n && bottom < 2n ** 53n) return direct
-  const scale = 10n ** 20n
-  return Number((top * scale) / bottom) / 1e20
-}
-
-/** What is wrong with a number that could not be read, in the author's words. */
-function numberFailure(text: string): Failure {
-  if (/^\d+,\d+$/.test(text))
-    return refuse('length-decimal-comma', `“${text}” has a decimal comma`, `write a dot: ${text.replace(',', '.')}`)
-  if (/^0x[0-9a-f]+$/i.test(text))
-    return refuse(
-      'length-hexadecimal',
-      `“${text}” is a hexadecimal number`,
-      `write it in ordinary digits: ${String(Number.parseInt(text, 16))}`,
-    )
-  if (/^0o[0-7]+$/i.test(text))
-    return refuse(
-      'length-octal',
-      `“${text}” is an octal number`,
-      `write it in ordinary digits: ${String(Number.parseInt(text.slice(2), 8))}`,
-    )
-  if (/^[\d.]+e[+-]?\d+$/i.test(text))
-    return refuse('length-exponent', `“${text}” has an exponent`, `write it out: ${String(Number(text))}`)
-  if (/\/\s*$|^\s*\/|\d\s*-\s*$/.test(text))
-    return refuse('length-missing-operand', `“${text}” lacks a part of its fraction`, 'write both numbers, such as 3/4')
-  return refuse(
-    'length-not-understood',
-    `“${text}” is not a length`,
-    'write a number with a unit, such as 148 mm, 8 1/4 in or 0.32 mm',
-  )
-}
-
-/** Number and unit of a text such as `8 1/4 in`; the unit may be missing. */
-function split(text: string): { readonly number: string; readonly unit: string } {
-  const match = /^(.*?)\s*([a-zA-Zµμ]+|["″”])?$/su.exec(text)
-  const number = match?.[1] ?? text
-  const unit = match?.[2] ?? ''
-  // 1e3 and 0x1f end in letters or digits that are no unit.
-  if (/^\d+e$/i.test(`${number}${unit}`) || /^0[xo]/i.test(text)) return { number: text, unit: '' }
-  return { number: number.trim(), unit }
-}
-
-const plain = /^(\d+(?:\.\d+)?)(?:\s*(mm|in|cm))?$/
 
 /**
- * Reads a length as its author wrote it.
+ * Reads a length as its author wrote it: integer, decimal, fraction or mixed number, with or without a unit.
  * @param defaultUnit unit where none is written
  * @returns millimetres, correctly rounded from the exact fraction; or the fact and what to write instead
  */
 export function parseLength(source: string, defaultUnit: LengthUnit, options: ParseOptions = {}): Reading<Length> {
   const text = source.trim()
-  const quick = plain.exec(text)
-  if (quick !== null && !/^0\d/.test(text)) {
-    const unit = (quick[2] ?? defaultUnit) as LengthUnit
-    if (unit === 'mm') return bounded({ mm: Number(quick[1]), unit, text }, options)
-  }
+  const quick = readPlain(text, defaultUnit)
+  return quick === null ? readExactly(text, defaultUnit, options) : withinBounds(quick, options)
+}
+
+function readExactly(text: string, defaultUnit: LengthUnit, options: ParseOptions): Reading<Length> {
   if (text === '') return refuse('length-empty', 'there is no length', 'write a number with a unit, such as 148 mm')
+  if (text.length > longestMeasure) return notUnderstood(text)
   const isNegative = /^[-−]/.test(text)
-  const { number, unit: unitText } = split(isNegative ? text.slice(1).trim() : text.replace(/^\+/, ''))
-  const unit = unitText === '' ? defaultUnit : unitNames[unitText]
-  if (unit === undefined) {
-    const near = nearestName(unitText.toLowerCase(), Object.keys(unitNames))
-    return refuse(
-      'length-unknown-unit',
-      `“${unitText}” is not a unit`,
-      near === null ? 'units are mm, cm, in, and for thickness um, mil, pt' : `did you mean ${near}?`,
-    )
-  }
+  const unsigned = text.replace(/^[-−+]\s*/, '')
+  const other = otherNotation(unsigned)
+  if (other !== null) return other
+  const { number, unit: word } = splitUnit(unsigned)
+  const unit = word === '' ? defaultUnit : unitNamed(word)
+  if (unit === null) return /\d/.test(number) || readNumber(number) !== null ? unknownUnit(word) : notUnderstood(text)
   if (number === '')
-    return refuse('length-missing-operand', `“${text}” has no number`, `write one before the unit, such as 12 ${unit}`)
+    return refuse(
+      'length-missing-operand',
+      `${quoted(text)} has no number`,
+      `write one before the unit, such as 12 ${unit}`,
+    )
   if (/^0\d/.test(number))
     return refuse(
       'length-octal',
-      `“${text}” begins with a nought, which some programs read as octal`,
+      `${quoted(text)} begins with a nought, which some programs read as octal`,
       `write ${number.replace(/^0+(?=\d)/, '')}`,
     )
-  const exact = exactNumber(number)
-  if (exact === null) return numberFailure(number)
-  if (exact[1] === 0n)
-    return refuse('length-zero-denominator', `“${text}” divides by nought`, 'write a fraction such as 3/4')
-  const [top, bottom] = perUnit[unit]
-  const mm = nearestDouble([exact[0] * top, exact[1] * bottom])
-  return bounded({ mm: isNegative ? -mm : mm, unit, text }, options)
+  const exact = readNumber(number)
+  if (exact === null) return numberFailure(number, text)
+  if (exact.bottom === 0n)
+    return refuse('length-zero-denominator', `${quoted(text)} divides by nought`, 'write a fraction such as 3/4')
+  const [top, bottom] = millimetresPerUnit[unit]
+  const mm = nearestDouble(multiplied(exact, rational(BigInt(top), BigInt(bottom))))
+  return withinBounds({ mm: isNegative && mm !== 0 ? -mm : mm, unit, text }, options)
 }
 
-function bounded(length: Length, options: ParseOptions): Reading<Length> {
+function unknownUnit(word: string): Reading<never> {
+  const meant = unitMeant(word)
+  return refuse(
+    'length-unknown-unit',
+    `${quoted(word)} is not a unit`,
+    meant === null ? 'units are mm, cm, in, and for thickness um, mil, pt' : `did you mean ${meant}?`,
+  )
+}
+
+function withinBounds(length: Length, options: ParseOptions): Reading<Length> {
   if (length.mm < 0 && options.allowNegative !== true)
     return refuse(
       'length-negative',
-      `“${length.text}” is negative`,
+      `${quoted(length.text)} is negative`,
       'only a clearance may be; write the length without the sign',
     )
   if (length.mm === 0 && options.allowZero !== true)
-    return refuse('length-zero', `“${length.text}” is nothing`, 'write a length larger than nought')
+    return refuse('length-zero', `${quoted(length.text)} is nothing`, 'write a length larger than nought')
   if (Math.abs(length.mm) > longest)
     return refuse(
       'length-too-long',
-      `“${length.text}” is more than 10 m`,
+      `${quoted(length.text)} is more than 10 m`,
       'check the unit; templates are made of sheets a hand can turn',
     )
   return { ok: true, value: length }
-}
-
-/** The unit a text ends with, if it names one. */
-export function trailingUnit(text: string): LengthUnit | null {
-  const { unit } = split(text.trim())
-  return unitNames[unit] ?? null
 }

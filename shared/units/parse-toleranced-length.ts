@@ -1,6 +1,8 @@
-import { parseLength, trailingUnit } from './parse-length.ts'
-import { isCount, sizeParts } from './parse-size.ts'
-import type { Length, LengthUnit, Reading, TolerancedLength } from './units.ts'
+import { trailingUnit } from './length-units.ts'
+import { parseLength } from './parse-length.ts'
+import { readSizeParts, type SizeDimensions } from './parse-size.ts'
+import { longestMeasure, quoted, refuse, type Failure } from './refuse.ts'
+import type { Length, LengthUnit, Millimetres, Reading, TolerancedLength } from './units.ts'
 
 export interface TolerancedOptions {
   /** A stack measured together, `3.2 mm / 10`: for calipers. */
@@ -8,32 +10,74 @@ export interface TolerancedOptions {
   readonly allowZero?: boolean
 }
 
-type Failure = Extract<Reading<never>, { ok: false }>
-const refuse = (code: string, fact: string, remedy: string): Failure => ({ ok: false, code, fact, remedy })
+interface Split {
+  readonly main: string
+  /** What follows ±. */
+  readonly even: string | null
+  /** What follows + and -, where they differ. */
+  readonly uneven: readonly [string, string] | null
+}
 
-const centred = (length: Length, halfWidth: number | null, text: string): Reading<TolerancedLength> => ({
-  ok: true,
-  value: { nominal: length.mm, halfWidth, text },
-})
+const leavesNothing = (text: string): Failure =>
+  refuse('tolerance-too-large', `the tolerance of ${quoted(text)} leaves nothing`, 'write a smaller tolerance')
 
-/** `0.37 mm ± 5 %` and `0.37 mm +- 0.02 mm`: the part after the sign. */
-function halfWidthOf(text: string, length: Length): Reading<number> {
-  const share = /^(\d+(?:\.\d+)?)\s*%$/.exec(text)
-  if (share !== null) {
-    const part = Number(share[1]) / 100
-    return part < 1
-      ? { ok: true, value: length.mm * part }
-      : refuse('tolerance-too-large', `a tolerance of ${text} leaves nothing`, 'write less than 100 %')
+/** Parts a text where its tolerance begins; `null` where a tolerance begins and cannot be read. */
+function splitTolerance(text: string): Split | null {
+  const at = text.search(/±|(?<!^)\+/)
+  if (at === -1) return { main: text, even: null, uneven: null }
+  const main = text.slice(0, at).trim()
+  const spread = text.slice(at)
+  const even = /^(?:±|\+-|\+\/-)\s*([^±+]*)$/.exec(spread)
+  if (even !== null) return { main, even: (even[1] ?? '').trim(), uneven: null }
+  const uneven = /^\+\s*([^±+-]+?)\s*\/\s*[-−]\s*([^±+]+)$/.exec(spread)
+  return uneven === null ? null : { main, even: null, uneven: [uneven[1] ?? '', uneven[2] ?? ''] }
+}
+
+/** A measured stack divided by its sheets; `null` where the text is none. A lone `3/10` is a fraction and means the same. */
+function parseStack(text: string, defaultUnit: LengthUnit): Reading<Length> | null {
+  const at = text.lastIndexOf('/')
+  const whole = text.slice(0, at).trim()
+  const sheets = /^\d{1,6}$/.exec(text.slice(at + 1).trim())?.[0]
+  if (at === -1 || sheets === undefined) return null
+  if (trailingUnit(whole) === null && !/^\d+\.\d+$/.test(whole)) return null
+  if (Number(sheets) < 1)
+    return refuse(
+      'stack-count',
+      `a stack of ${sheets} sheets cannot be measured`,
+      'write how many sheets were measured together, such as 3.2 mm / 10',
+    )
+  const stack = parseLength(whole, defaultUnit)
+  if (!stack.ok) return stack
+  return { ok: true, value: { ...stack.value, mm: stack.value.mm / Number(sheets), text } }
+}
+
+const stackTolerance = (text: string): Failure =>
+  refuse(
+    'stack-tolerance',
+    `the tolerance ${quoted(text)} could be meant for the stack or for one sheet`,
+    'write it in per cent, such as 3.2 mm / 10 ± 5 %',
+  )
+
+/** What follows ±: a share of the length in per cent, or a length. */
+function readHalfWidth(spread: string, length: Length, isStack: boolean): Reading<Millimetres> {
+  if (spread === '')
+    return refuse(
+      'tolerance-missing',
+      `no tolerance follows the ± of ${quoted(length.text)}`,
+      'write one, such as ± 5 %',
+    )
+  if (spread.endsWith('%')) {
+    const share = /^(\d+(?:\.\d+)?)\s*%$/.exec(spread)?.[1]
+    if (share !== undefined) return { ok: true, value: (length.mm * Number(share)) / 100 }
+    return refuse(
+      'tolerance-not-understood',
+      `${quoted(spread)} is not a share`,
+      `write it such as ${/^\d+,\d+\s*%$/.test(spread) ? spread.replace(',', '.') : '5 % or 2.5 %'}`,
+    )
   }
-  const reading = parseLength(text, length.unit, { allowZero: true })
-  if (!reading.ok) return reading
-  return reading.value.mm < length.mm
-    ? { ok: true, value: reading.value.mm }
-    : refuse(
-        'tolerance-too-large',
-        `a tolerance of ${text} leaves nothing of ${length.text}`,
-        'write a smaller tolerance',
-      )
+  if (isStack) return stackTolerance(spread)
+  const reading = parseLength(spread, length.unit, { allowZero: true })
+  return reading.ok ? { ok: true, value: reading.value.mm } : reading
 }
 
 /** A length with a tolerance; an uneven one is moved to its middle and taken as uniform. */
@@ -43,73 +87,54 @@ export function parseTolerancedLength(
   options: TolerancedOptions = {},
 ): Reading<TolerancedLength> {
   const text = source.trim()
-  const zero = { allowZero: options.allowZero ?? false }
-  const even = /^(.*?)\s*(?:±|\+-|\+\/-)\s*(.*)$/su.exec(text)
-  if (even !== null) {
-    const [, main = '', spread = ''] = even
-    const length = parseLength(main, trailingUnit(main) ?? trailingUnit(spread.replace('%', '')) ?? defaultUnit, zero)
-    if (!length.ok) return length
-    const half = halfWidthOf(spread.trim(), length.value)
-    return half.ok ? centred(length.value, half.value, text) : half
-  }
-  const uneven = /^(.*?)\s*\+\s*([^/]+?)\s*\/\s*[-−]\s*(.+)$/su.exec(text)
-  if (uneven !== null) {
-    const [, main = '', up = '', down = ''] = uneven
-    const unit = trailingUnit(down) ?? trailingUnit(main) ?? defaultUnit
-    const length = parseLength(main, unit, zero)
-    if (!length.ok) return length
-    const above = parseLength(up, unit, { allowZero: true })
-    if (!above.ok) return above
-    const below = parseLength(down, unit, { allowZero: true })
-    if (!below.ok) return below
-    const half = (above.value.mm + below.value.mm) / 2
-    const nominal = length.value.mm + (above.value.mm - below.value.mm) / 2
-    if (half >= nominal)
-      return refuse('tolerance-too-large', `the tolerance of “${text}” leaves nothing`, 'write a smaller tolerance')
-    return { ok: true, value: { nominal, halfWidth: half, text } }
-  }
-  const stack = options.allowStack === true ? /^(.*(?:mm|cm|in|um|µm|μm|mil|pt|["″”]))\s*\/\s*(\d+)$/u.exec(text) : null
-  if (stack !== null) {
-    const [, main = '', sheets = '1'] = stack
-    const count = Number(sheets)
-    if (count < 1)
-      return refuse(
-        'stack-count',
-        `a stack of ${sheets} sheets cannot be measured`,
-        'write how many sheets were measured together, such as 3.2 mm / 10',
-      )
-    const length = parseLength(main, defaultUnit)
-    return length.ok ? { ok: true, value: { nominal: length.value.mm / count, halfWidth: null, text } } : length
-  }
-  const length = parseLength(text, defaultUnit, zero)
-  return length.ok ? centred(length.value, null, text) : length
+  const split = text.length > longestMeasure ? null : splitTolerance(text)
+  if (split === null)
+    return refuse(
+      'tolerance-not-understood',
+      `${quoted(text)} has a tolerance that cannot be read`,
+      'write it such as 0.37 mm ± 5 %, 0.37 mm +- 0.02 mm or 0.37 +0.03/-0.01 mm',
+    )
+  const { main, even, uneven } = split
+  const unit = trailingUnit(main) ?? trailingUnit(uneven?.[1] ?? even ?? '') ?? defaultUnit
+  const stack = options.allowStack === true ? parseStack(main, unit) : null
+  const length = stack ?? parseLength(main, unit, { allowZero: options.allowZero ?? false })
+  if (!length.ok) return length
+  if (uneven !== null) return stack === null ? recentred(length.value, uneven, text) : stackTolerance(text)
+  if (even === null) return { ok: true, value: { nominal: length.value.mm, halfWidth: null, text } }
+  const halfWidth = readHalfWidth(even, length.value, stack !== null)
+  if (!halfWidth.ok) return halfWidth
+  return halfWidth.value < length.value.mm
+    ? { ok: true, value: { nominal: length.value.mm, halfWidth: halfWidth.value, text } }
+    : leavesNothing(text)
+}
+
+function recentred(length: Length, [up, down]: readonly [string, string], text: string): Reading<TolerancedLength> {
+  const unit = trailingUnit(down) ?? length.unit
+  const above = parseLength(up, unit, { allowZero: true })
+  if (!above.ok) return above
+  const below = parseLength(down, unit, { allowZero: true })
+  if (!below.ok) return below
+  const halfWidth = (above.value.mm + below.value.mm) / 2
+  const nominal = length.mm + (above.value.mm - below.value.mm) / 2
+  return halfWidth < nominal ? { ok: true, value: { nominal, halfWidth, text } } : leavesNothing(text)
 }
 
 /** A size with one tolerance for all its lengths, `162 x 114 mm ± 0.8 mm`, or each with its own. */
 export function parseTolerancedSize(
   source: string,
   defaultUnit: LengthUnit,
-  dimensions: 2 | 3 | '2 or 3',
+  dimensions: SizeDimensions,
 ): Reading<readonly TolerancedLength[]> {
-  const text = source.trim()
-  const parts = sizeParts(text)
-  if (!isCount(parts.length, dimensions) || parts.includes('')) {
-    return refuse(
-      'size-parts',
-      `“${text}” is not a size of ${String(dimensions)} lengths`,
-      'write A x B or A x B x D, such as 162 x 114 mm ± 0.8 mm',
-    )
-  }
-  const sign = /\s*(±|\+-|\+\/-)\s*/
-  const toleranced = parts.filter((part) => sign.test(part) || /\+.*\//.test(part))
-  const last = parts.at(-1) ?? ''
-  const isForAll = toleranced.length === 1 && toleranced[0] === last && parts.length > 1
-  const [lastMain = last] = last.split(sign)
-  const unit = trailingUnit(lastMain) ?? trailingUnit(last) ?? defaultUnit
-  const spread = isForAll ? last.slice(lastMain.length) : ''
+  const parts = readSizeParts(source.trim(), dimensions)
+  if (!parts.ok) return parts
+  const last = parts.value.at(-1) ?? ''
+  const at = last.search(/\s*[±+]/)
+  const unit = trailingUnit(at === -1 ? last : last.slice(0, at)) ?? trailingUnit(last) ?? defaultUnit
+  const isForAll = at > 0 && !parts.value.slice(0, -1).some((part) => /[±+]/.test(part))
   const lengths: TolerancedLength[] = []
-  for (const part of parts) {
-    const reading = parseTolerancedLength(part === last ? part : `${part}${spread}`, unit)
+  for (const [index, part] of parts.value.entries()) {
+    const isLast = index === parts.value.length - 1
+    const reading = parseTolerancedLength(isForAll && !isLast ? `${part}${last.slice(at)}` : part, unit)
     if (!reading.ok) return reading
     lengths.push(reading.value)
   }
