@@ -29,6 +29,12 @@ export function putInWords(judged: JudgedFit): string {
   return fit.holding === null ? stack : `${stack} with ${fit.holding}`
 }
 
+const preposition = { in: 'in', over: 'on', around: 'around' } as const
+
+/** A fit in the author's nouns: `lid on base`, `6 envelope with card in base`; `does` says what goes on there. */
+export const fitInWords = (judged: JudgedFit, does?: string): string =>
+  `${putInWords(judged)} ${does === undefined ? '' : `${does} `}${preposition[judged.fit.relation]} ${judged.fit.to}`
+
 /** Where along the pieces an axis lies. */
 export function acrossInWords(axis: AxisName): string {
   switch (axis) {

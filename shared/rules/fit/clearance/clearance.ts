@@ -3,14 +3,12 @@ import type { JudgedFit } from '../../../assembly/judge-fit.ts'
 import type { JudgedSet } from '../../../assembly/judge-set.ts'
 import { modelDefaults } from '../../../pieces/model-defaults.ts'
 import type { Finding, Rule } from '../../rule.ts'
-import { acrossInWords, inSetUnits, madeBy, outOfHundred, putInWords } from '../../wording.ts'
+import { acrossInWords, fitInWords, inSetUnits, madeBy, outOfHundred } from '../../wording.ts'
 import { judgeAxes, missOf, needInWords, sharesInWords } from '../axis-wording.ts'
-
-const preposition = { in: 'in', over: 'on', around: 'around' } as const
 
 /** `lid binds on base across the width` */
 const thing = (fit: JudgedFit, axis: JudgedAxis, does: string): string =>
-  `${putInWords(fit)} ${does} ${preposition[fit.fit.relation]} ${fit.fit.to} ${acrossInWords(axis.clearance.axis)}`
+  `${fitInWords(fit, does)} ${acrossInWords(axis.clearance.axis)}`
 
 function giveInWords(judged: JudgedSet, fit: JudgedFit, axis: JudgedAxis): string {
   if (!axis.restsOnGive) return ''

@@ -5,7 +5,7 @@ import { modelDefaults } from '../../../pieces/model-defaults.ts'
 import type { PieceGiven } from '../../../pieces/given.ts'
 import { oncePerSet } from '../../once-per-set.ts'
 import type { Finding, Rule } from '../../rule.ts'
-import { putInWords } from '../../wording.ts'
+import { fitInWords } from '../../wording.ts'
 
 const isMeasured = (piece: PieceGiven | undefined): boolean => piece?.stock != null && piece.made === 'measured'
 
@@ -25,7 +25,7 @@ const percent = (scale: number): string => `${String(Number((scale * 100).toFixe
 
 function judgeWindow(judged: JudgedSet, fit: JudgedFit): Pick<Finding, 'severity' | 'measure' | 'message'> {
   const window = scaleWindow(judged, fit)
-  const thing = `${putInWords(fit)} ${fit.fit.relation} ${fit.fit.to}`
+  const thing = fitInWords(fit)
   if (window === null)
     return {
       severity: 'info',
@@ -47,7 +47,7 @@ function judgeWindow(judged: JudgedSet, fit: JudgedFit): Pick<Finding, 'severity
 
 function judgeTraced(judged: JudgedSet, fit: JudgedFit): Pick<Finding, 'severity' | 'measure' | 'message'> {
   const printed = traced(judged).get(fit.fit.id)
-  const thing = `${putInWords(fit)} ${fit.fit.relation} ${fit.fit.to}`
+  const thing = fitInWords(fit)
   const isWorse = printed?.verdict === 'fail' && fit.verdict !== 'fail'
   return {
     severity: isWorse ? 'info' : 'pass',

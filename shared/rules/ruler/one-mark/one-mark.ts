@@ -2,7 +2,7 @@ import { judgeAxis, type JudgedAxis } from '../../../assembly/judge-axis.ts'
 import type { JudgedFit } from '../../../assembly/judge-fit.ts'
 import type { JudgedSet } from '../../../assembly/judge-set.ts'
 import type { Finding, Rule } from '../../rule.ts'
-import { inSetUnits, listInWords, putInWords } from '../../wording.ts'
+import { inSetUnits, listInWords, fitInWords } from '../../wording.ts'
 import { markedFits, mayFailAt, type MarkedAxis, type MarkOfAxis } from '../marks.ts'
 
 /** A measure and the mark it is mistaken for. */
@@ -35,7 +35,7 @@ function misreadingsOf(judged: JudgedSet, { axis, marks: all }: MarkedAxis): rea
 
 function judgeFitMarks(judged: JudgedSet, fit: JudgedFit, axes: readonly MarkedAxis[]): Finding {
   const common = { subject: fit.fit.id, path: ['fits', fit.fit.id] }
-  const thing = `${putInWords(fit)} ${fit.fit.relation} ${fit.fit.to}`
+  const thing = fitInWords(fit)
   if (fit.verdict === 'fail')
     return {
       ...common,

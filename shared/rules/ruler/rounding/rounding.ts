@@ -6,7 +6,7 @@ import { formatLength } from '../../../units/format-length.ts'
 import { roundToGrid } from '../../../units/grid.ts'
 import type { Ruler, RulerUnit } from '../../../units/units.ts'
 import type { Finding, Rule } from '../../rule.ts'
-import { acrossInWords, inSetUnits, listInWords, putInWords } from '../../wording.ts'
+import { acrossInWords, inSetUnits, listInWords, fitInWords } from '../../wording.ts'
 import { markedFits, mayFailAt, type MarkedAxis, type MarkOfAxis } from '../marks.ts'
 
 const usualRulers: Readonly<Record<RulerUnit, Ruler>> = {
@@ -56,7 +56,7 @@ function failureInWords(judged: JudgedSet, { unit, axis, shift, marks }: Moved):
 
 function judgeRounding(judged: JudgedSet, fit: JudgedFit, axes: readonly MarkedAxis[]): Finding {
   const common = { subject: fit.fit.id, path: ['fits', fit.fit.id] }
-  const thing = `${putInWords(fit)} ${fit.fit.relation} ${fit.fit.to}`
+  const thing = fitInWords(fit)
   if (fit.verdict === 'fail')
     return {
       ...common,

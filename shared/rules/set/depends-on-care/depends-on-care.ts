@@ -1,6 +1,6 @@
 import { modelDefaults } from '../../../pieces/model-defaults.ts'
 import type { Rule } from '../../rule.ts'
-import { putInWords } from '../../wording.ts'
+import { fitInWords } from '../../wording.ts'
 
 export const dependsOnCareRule: Rule = {
   id: 'set/depends-on-care',
@@ -14,7 +14,7 @@ export const dependsOnCareRule: Rule = {
   remedy: 'Have it test-built before you publish, or leave more clearance.',
   judge: (judged) =>
     judged.fits.map((fit) => {
-      const thing = `${putInWords(fit)} ${fit.fit.relation} ${fit.fit.to}`
+      const thing = fitInWords(fit)
       return {
         subject: fit.fit.id,
         severity: fit.dependsOnCare ? 'info' : 'pass',
