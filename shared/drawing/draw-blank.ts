@@ -142,7 +142,13 @@ function scoreMarks(score: Score, size: Millimetres, isBare: boolean, spaces: re
       }
     }
   }
-  return [own]
+  if (!isShort) return [own]
+  // Its letter is all that tells a short line apart, so it stands there whatever else does.
+  const off = size * 0.5 + 0.9
+  return [
+    own,
+    centred(layer, { x: middle.x - Math.sin(turn) * off, y: middle.y + Math.cos(turn) * off }, style.tick, size, angle),
+  ]
 }
 
 function nameMarks(blank: Blank, size: Millimetres, space: FreeSpace): readonly Mark[] {

@@ -21,6 +21,8 @@ export interface Raster {
   readonly width: number
   readonly height: number
   readonly isDark: (x: number, y: number) => boolean
+  /** Bytes of a row, 0 where it is black: drawn without smoothing there is nothing between. */
+  readonly row: (y: number) => Buffer
   /** Pixels in a millimetre. */
   readonly perMm: number
 }
@@ -65,13 +67,13 @@ export function darkBounds(raster: Raster): {
 } {
   let [left, top, right, bottom] = [Infinity, Infinity, -Infinity, -Infinity]
   for (let y = 0; y < raster.height; y += 1) {
-    for (let x = 0; x < raster.width; x += 1) {
-      if (!raster.isDark(x, y)) continue
-      left = Math.min(left, x)
-      right = Math.max(right, x + 1)
-      top = Math.min(top, y)
-      bottom = Math.max(bottom, y + 1)
-    }
+    const row = raster.row(y)
+    const first = row.indexOf(0)
+    if (first < 0) continue
+    left = Math.min(left, first)
+    right = Math.max(right, row.lastIndexOf(0) + 1)
+    top = Math.min(top, y)
+    bottom = Math.max(bottom, y + 1)
   }
   return {
     left: left / raster.perMm,
