@@ -30,7 +30,8 @@ export const worse = (a: FitVerdict, b: FitVerdict): FitVerdict => (rank[a] >= r
 export const isWorse = (a: FitVerdict, b: FitVerdict): boolean => rank[a] > rank[b]
 
 /** Sources that depend on how exactly makers work, as against what paper and air do. */
-export const isWorkmanship = (source: string): boolean => /^(cut|score|fence)\(/.test(source)
+export const isWorkmanship = (source: string): boolean =>
+  source.startsWith('score(') || source.startsWith('cut(') || source.startsWith('fence(')
 
 /** The same clearance made by more careful or hastier hands. */
 export const withCare = (dimension: Dimension, factor: number): Dimension =>

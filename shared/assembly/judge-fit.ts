@@ -2,6 +2,7 @@ import { modelDefaults } from '../pieces/model-defaults.ts'
 import type { Fit } from '../template/template-model.ts'
 import { jointProbability } from '../uncertainty/joint.ts'
 import type { Dimension } from '../uncertainty/dimension.ts'
+import { worstCase } from '../uncertainty/moments.ts'
 import { clearancesOf, type FitClearances, type Orientation } from './clearances.ts'
 import {
   bowGive,
@@ -9,6 +10,7 @@ import {
   clears,
   closesAt,
   judgeAxis,
+  withCare,
   worse,
   type FitVerdict,
   type JudgedAxis,
@@ -73,16 +75,23 @@ interface Chosen {
 
 /** The orientation whose worst axis binds least; ties stay unturned. */
 function chooseOrientation(clearances: FitClearances, shares: Shares): Chosen {
-  const judged = clearances.orientations.map((orientation) => ({
-    orientation,
-    axes: judgeOrientation(clearances, orientation, shares, 1),
-  }))
-  const first = judged[0]
+  const [first, ...others] = clearances.orientations
   if (first === undefined) throw new RangeError('a fit has no orientation')
-  // Differences below what the distribution is computed to are ties.
-  return judged
-    .slice(1)
-    .reduce((best, next) => (worstBinding(next.axes) < worstBinding(best.axes) - 1e-4 ? next : best), first)
+  let best: Chosen = { orientation: first, axes: judgeOrientation(clearances, first, shares, 1) }
+  for (const orientation of others) {
+    // Differences below what the distribution is computed to are ties, and nothing binds less than nothing.
+    if (worstBinding(best.axes) <= 1e-4) break
+    const axes = judgeOrientation(clearances, orientation, shares, 1)
+    if (worstBinding(axes) < worstBinding(best.axes) - 1e-4) best = { orientation, axes }
+  }
+  return best
+}
+
+/** True where even the hastiest hands cannot leave the band: then no care changes the verdict. */
+function isSureOfItself(axis: JudgedAxis): boolean {
+  const { band } = axis.clearance.requirement
+  const { min, max } = worstCase(withCare(axis.clearance.clearance, modelDefaults.careHigh.value))
+  return (band.min === null || min >= band.min) && (band.max === null || max <= band.max)
 }
 
 const verdictOf = (axes: readonly JudgedAxis[]): FitVerdict => axes.map((axis) => axis.verdict).reduce(worse, 'pass')
@@ -114,9 +123,11 @@ export function judgeFit(model: SetModel, fit: Fit): JudgedFit {
   const chosen = chooseOrientation(clearances, shares)
   const verdict = verdictOf(chosen.axes)
   const conditions = conditionsOf(chosen.axes)
-  const dependsOnCare = [modelDefaults.careLow.value, modelDefaults.careHigh.value].some(
-    (care) => verdictOf(judgeOrientation(clearances, chosen.orientation, shares, care)) !== verdict,
-  )
+  const dependsOnCare =
+    !chosen.axes.every(isSureOfItself) &&
+    [modelDefaults.careLow.value, modelDefaults.careHigh.value].some(
+      (care) => verdictOf(judgeOrientation(clearances, chosen.orientation, shares, care)) !== verdict,
+    )
   return {
     fit,
     clearances,

@@ -9,6 +9,25 @@ const boxesMeet = (a: Segment, b: Segment): boolean =>
   Math.max(a.from.y, a.to.y) + samePoint >= Math.min(b.from.y, b.to.y) &&
   Math.max(b.from.y, b.to.y) + samePoint >= Math.min(a.from.y, a.to.y)
 
+interface Box {
+  readonly left: number
+  readonly right: number
+  readonly bottom: number
+  readonly top: number
+}
+
+/** A segment's bounds, widened by what counts as the same point. */
+const boxOf = ({ from, to }: Segment): Box => ({
+  left: Math.min(from.x, to.x) - samePoint,
+  right: Math.max(from.x, to.x) + samePoint,
+  bottom: Math.min(from.y, to.y) - samePoint,
+  top: Math.max(from.y, to.y) + samePoint,
+})
+
+/** Most pairs of edges are far apart; this is all that is asked of them. */
+const areApart = (a: Box, b: Box): boolean =>
+  a.left > b.right || b.left > a.right || a.bottom > b.top || b.bottom > a.top
+
 /** A point that two segments share, touching ends included; `null` where they keep apart. */
 export function meetingPoint(a: Segment, b: Segment): Point | null {
   if (!boxesMeet(a, b)) return null
@@ -38,11 +57,14 @@ function turnsBack(a: Segment, b: Segment): boolean {
 /** Points at which a closed outline crosses, touches or runs back over itself; none for a simple outline. */
 export function crossingsOf(polygon: Polygon): readonly Point[] {
   const edges = edgesOf(polygon)
+  const boxes = edges.map(boxOf)
   const found: Point[] = []
   edges.forEach((edge, index) => {
+    const box = boxes[index]
     for (let other = index + 1; other < edges.length; other += 1) {
       const second = edges[other]
-      if (second === undefined) continue
+      const secondBox = boxes[other]
+      if (second === undefined || box === undefined || secondBox === undefined || areApart(box, secondBox)) continue
       const isNext = other === index + 1
       const isLast = index === 0 && other === edges.length - 1
       if (isNext || isLast) {
