@@ -36,6 +36,9 @@ function meantBranch(errors: readonly (readonly Issue[])[]): readonly Issue[] | 
   return inner.length === 1 ? (inner[0] ?? null) : null
 }
 
+/** Unknown keys of one map that are looked into. */
+const mostUnknown = 60
+
 /** Reports keys that a map has no place for, each with the nearest that it has. */
 export function reportUnknownKeys(
   path: Path,
@@ -46,7 +49,7 @@ export function reportUnknownKeys(
   report: ReportProblem,
 ): void {
   const unused = allowed.filter((key) => !isRawMap(map) || !Object.hasOwn(map, key))
-  for (const key of keys) {
+  for (const key of keys.slice(0, mostUnknown)) {
     const nearest = nearestName(key, unused)
     report(
       [...path, key],

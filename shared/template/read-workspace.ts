@@ -31,7 +31,7 @@ export function emptyWorkspace(): Workspace {
 export function reportIn(tree: SourceTree, problems: ProblemList): ReportProblem {
   const isDamaged = (path: Path): boolean => tree.damaged.some((at) => at.every((step, index) => path[index] === step))
   return (path, code, message, hint, side) => {
-    if (!isDamaged(path))
+    if (!problems.isFull && !isDamaged(path))
       problems.report(code, message, hint, side === 'key' ? tree.placeOfKey(path) : tree.placeOfValue(path))
   }
 }

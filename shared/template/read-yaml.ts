@@ -141,7 +141,7 @@ export function readYaml(text: string, file: string, problems: ProblemList): Sou
     return null
   }
   const plain = toPlainData(contents, source.text, (code, message, hint, range, path) => {
-    problems.report(code, message, hint, source.placeAt(range[0], range[1], path))
+    if (!problems.isFull) problems.report(code, message, hint, source.placeAt(range[0], range[1], path))
   })
   if (!isRawMap(plain.root)) {
     problems.report(

@@ -12,6 +12,7 @@ import {
   textShape,
   wordShape,
 } from '../pieces/shape/shape-parts.ts'
+import { mailPackNames } from './mail-pack-names.ts'
 import { clearanceMapShape, tokenGroups, tokenKeys } from './token-shapes.ts'
 
 const putShape = () =>
@@ -26,8 +27,10 @@ const putShape = () =>
               later(() =>
                 mapShape(
                   {
-                    count: optional(countShape({ description: 'How many.', default: 1 }, 1, mostPieces)),
-                    piece: nameShape('a piece', { description: 'Which piece.' }),
+                    count: optional(
+                      countShape({ title: 'Count', description: 'How many.', default: 1 }, 1, mostPieces),
+                    ),
+                    piece: nameShape('a piece', { title: 'Piece', description: 'Which piece.' }),
                   },
                   'a map of `count` and `piece`',
                   { description: 'A count and a piece.' },
@@ -135,7 +138,7 @@ export const setKeys = {
       examples: ['a4', 'letter', '420 x 297 mm'],
     }),
   mail: () =>
-    nameShape('postal rules', {
+    wordShape(mailPackNames, {
       title: 'Mail',
       description: 'Dated postal rules that the filled envelope should meet; advice.',
       examples: ['usps-letter'],

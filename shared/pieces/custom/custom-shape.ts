@@ -11,8 +11,9 @@ import {
   wordShape,
 } from '../shape/shape-parts.ts'
 
-const pointShape = (description: string) =>
+const pointShape = (title: string, description: string) =>
   pairShape(lengthShape({ description: 'A coordinate.' }), 'a point of two coordinates, such as `[0, 45.5]`', {
+    title,
     description,
     examples: [[0, 45.5]],
   })
@@ -23,18 +24,22 @@ export const customSpec = mapSpec(
     ...kindKey('custom'),
     stock: stockShape,
     outline: () =>
-      listShape(pointShape('A corner of the blank.'), 'a list of points, such as `[[0, 0], [90, 0], [90, 60]]`', {
-        title: 'Outline',
-        description: 'The corners of the blank in order.',
-        examples: [
-          [
-            [0, 0],
-            [90, 0],
-            [90, 60],
-            [0, 60],
+      listShape(
+        pointShape('Point', 'A corner of the blank.'),
+        'a list of points, such as `[[0, 0], [90, 0], [90, 60]]`',
+        {
+          title: 'Outline',
+          description: 'The corners of the blank in order.',
+          examples: [
+            [
+              [0, 0],
+              [90, 0],
+              [90, 60],
+              [0, 60],
+            ],
           ],
-        ],
-      }),
+        },
+      ),
   },
   {
     ...pieceBaseKeys,
@@ -42,8 +47,8 @@ export const customSpec = mapSpec(
       listShape(
         mapShape(
           {
-            from: pointShape('Where the score begins.'),
-            to: pointShape('Where the score ends.'),
+            from: pointShape('From', 'Where the score begins.'),
+            to: pointShape('To', 'Where the score ends.'),
             fold: optional(
               wordShape(['valley', 'mountain'], {
                 title: 'Fold',

@@ -13,7 +13,8 @@ export function readScores(
   read: ValueReader,
 ): readonly Millimetres[] {
   if (written === undefined) {
-    if (counts.length > 0) {
+    // A blank that could not be read may have been meant to be left open.
+    if (counts.length > 0 && !Number.isNaN(length)) {
       read.report(
         ['scores'],
         'missing-key',

@@ -11,7 +11,8 @@ export const exampleWorkspace = (): Workspace => readWorkspace(exampleText('fold
 /** The set a sound text gives; its problems where it is not sound. */
 export function soundSet(text: string, workspace: Workspace = emptyWorkspace()): TemplateSet {
   const { set, problems } = readSet(text, 'sets/trial.yaml', workspace)
-  if (set === null) throw new Error(problems.map(({ message, hint, at }) => `${String(at.line)}: ${message} ${hint}`).join('\n'))
+  if (set === null)
+    throw new Error(problems.map(({ message, hint, at }) => `${String(at.line)}: ${message} ${hint}`).join('\n'))
   return set
 }
 

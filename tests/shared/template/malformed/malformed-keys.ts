@@ -142,6 +142,7 @@ export const malformedKeys: readonly MalformedCase[] = [
     pieces('e: { kind: envelope, style: baronial, stock: thin, pocket: 156 x 112, liner: «thinn» }'),
   ),
   malformed('a maker there is none of', 'unknown-maker', card('folded: 148 x 105, workmanship: «studo»'), 'studio'),
+  malformed('postal rules nearly written right', 'unknown-word', below('mail: «usps-leter»'), 'usps-letter'),
   malformed('a family there is none of', 'unknown-family', below('family: «orchard»')),
   malformed('a level there is none of', 'unknown-word', below('checks: { mail/ratio: «wran» }'), 'warn'),
   malformed('a rule that has no such form', 'unknown-rule', below('checks: { «mail ratio»: off }')),

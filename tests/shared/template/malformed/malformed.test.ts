@@ -65,7 +65,7 @@ describe('a malformed template', () => {
       for (const { message, hint } of problemsOf(unmark(text).text, as)) {
         for (const sentence of [message, hint]) {
           expect(sentence).toMatch(/^[A-Z“0-9].*[.!?]”?$/su)
-          expect(sentence.length).toBeLessThan(330)
+          expect(sentence.length).toBeLessThan(450)
           expect(sentence.replace(/“[^”]*”/g, '')).not.toMatch(insideWords)
           expect(sentence).not.toContain('`')
         }
