@@ -32,7 +32,8 @@ function readPgm(bytes: Buffer, dpi: number): Raster {
   if (head === null) throw new Error('not a grey picture')
   const [width, height] = [Number(head[1]), Number(head[2])]
   const start = head[0].length
-  return { width, height, perMm: dpi / 25.4, isDark: (x, y) => (bytes[start + y * width + x] ?? 255) < 128 }
+  const row = (y: number): Buffer => bytes.subarray(start + y * width, start + (y + 1) * width)
+  return { width, height, perMm: dpi / 25.4, isDark: (x, y) => (bytes[start + y * width + x] ?? 255) < 128, row }
 }
 
 /** Pages of a PDF as pixels, drawn by poppler without smoothing. */
