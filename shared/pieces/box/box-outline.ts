@@ -106,10 +106,9 @@ export function thumbNotchRadius(
     : notchRadius(Math.min(...form.walls.length), form.scored.width)
 }
 
-/** A half-round bite out of a wall's rim, between the rim's two ends; the rim runs counter-clockwise. */
-function notchIn(from: Point, to: Point, wall: Millimetres): readonly Point[] {
+/** A half-round bite out of a wall's rim, in the middle between its two ends; the rim runs counter-clockwise. */
+function notchIn(from: Point, to: Point, radius: Millimetres): readonly Point[] {
   const middle = along(from, to, 0.5)
-  const radius = notchRadius(wall, distance(from, to))
   const direction = Math.atan2(to.y - from.y, to.x - from.x)
   return arcPoints(middle, radius, direction + Math.PI, direction)
 }
@@ -117,6 +116,11 @@ function notchIn(from: Point, to: Point, wall: Millimetres): readonly Point[] {
 /** The cut outline counter-clockwise from the lower left corner; a corner without trim or taper is a slit, not a notch. */
 export function trayOutline(shape: TrayShape): Polygon {
   const corners = cornersOf(shape)
+  const scored = {
+    length: shape.length - shape.walls.length[0] - shape.walls.length[1],
+    width: shape.width - shape.walls.width[0] - shape.walls.width[1],
+  }
+  const radius = thumbNotchRadius({ walls: shape.walls, scored }, shape.tabs.at)
   const points = corners.flatMap((corner, index) => {
     const { tab, isBefore } = tabAt(corner, shape)
     const round =
@@ -129,8 +133,7 @@ export function trayOutline(shape: TrayShape): Polygon {
     // Notches lie in the walls the tabs are glued to, which are the ones a thumb finds from the side.
     const isGluedWall = corner.beforeAxis === (shape.tabs.at === 'ends' ? 'length' : 'width')
     if (!shape.thumbNotch || !isGluedWall || next === undefined) return path
-    const wall = distance(corner.floor, corner.after)
-    return [...path, ...notchIn(corner.after, next.before, wall)]
+    return [...path, ...notchIn(corner.after, next.before, radius)]
   })
   return withoutRepeats(points)
 }

@@ -19,9 +19,9 @@ beforeAll(async () => {
 })
 
 /** The true-size page of a piece on the smallest sheet that holds it. */
-function pageOf(given: PieceGiven): Page {
+function pageOf(given: PieceGiven, sizes: readonly string[] = ['a4', 'tabloid']): Page {
   const set = anExportSet([given])
-  for (const size of ['a4', 'tabloid']) {
+  for (const size of sizes) {
     const options = documentOptions({ size: pageNamed(size), pieces: [given.name] })
     const page = templateDocument(set, planSteps(set), options)[0]
     if (page !== undefined && !page.title.includes('plan')) return page
@@ -137,7 +137,7 @@ describe.runIf(hasTool('pdftoppm'))('pages rastered at 600 dpi', () => {
   it('show a square that stands on a corner point to point, and its pocket between its folds', async () => {
     const given = aBaronial({ name: 'envelope', pocket: { length: 110, width: 80 }, seam: { bottom: 12, top: 12 } })
     const square = (110 + 80) / Math.SQRT2 + 12
-    const page = pageOf(given)
+    const page = pageOf(given, ['tabloid'])
     const cut = darkBounds(rasterPdf(await pdfOf(page, ['cut']), 600, 1))
     // A mitred right-angled point reaches half the line's width times √2 beyond the corner.
     const diagonal = square * Math.SQRT2 + lineStyles.cut.width * Math.SQRT2
