@@ -19,8 +19,19 @@ export interface Distribution {
   readonly quantile: (share: number) => number
 }
 
+/** Distributions made so far: dimensions never change, and rules ask about the same ones again. */
+const made = new WeakMap<Dimension, Distribution>()
+
 /** The distribution of a dimension; nothing is computed until a value inside its worst case is asked for. */
 export function distributionOf(dimension: Dimension): Distribution {
+  const known = made.get(dimension)
+  if (known !== undefined) return known
+  const distribution = makeDistribution(dimension)
+  made.set(dimension, distribution)
+  return distribution
+}
+
+function makeDistribution(dimension: Dimension): Distribution {
   const { nominal } = dimension
   const spread = spreadOf(dimension)
   const { reach } = spread

@@ -1,8 +1,8 @@
+import { samePoint } from '../geometry/tolerance.ts'
 import type { Condition } from './joint.ts'
-import { latticeStep, type LatticeSize } from './lattice.ts'
+import { latticeStep, type LatticeSize, type LatticeStep } from './lattice.ts'
 import { privatePartOf, sharedPartsOf, type SharedPart } from './shared-parts.ts'
 import { lookUp, slices, tabulate, type Table } from './tabulate.ts'
-import { samePoint } from '../geometry/tolerance.ts'
 
 /** A condition with the share of builds that fail it. */
 export interface OpenCondition extends Condition {
@@ -28,34 +28,72 @@ function chooseSize(shared: readonly SharedPart[], conditions: number): LatticeS
 
 /** Adds ratio·value to each sum. */
 function addScaled(sums: Float64Array, values: Float64Array, ratio: number): void {
-  for (let index = 0; index < block; index += 1) sums[index] = (sums[index] ?? 0) + ratio * (values[index] ?? 0)
+  for (let point = 0; point < block; point += 1) sums[point] = (sums[point] ?? 0) + ratio * (values[point] ?? 0)
 }
 
 /**
- * The values of a shared part at the points from `from` on. The lattice is folded at the middle of each coordinate, which makes the integrand periodic; that is what
- * a lattice integrates best (the baker's transformation, published).
+ * The values of a shared part at the points from `from` on. The lattice is folded at the middle of each coordinate,
+ * which makes the integrand periodic; that is what a lattice integrates best (the baker's transformation, published).
  */
 function fillValues(
   values: Float64Array,
-  from: number,
-  size: LatticeSize,
-  coordinate: number,
   atom: Float64Array,
+  { start, step }: LatticeStep,
+  size: number,
+  from: number,
 ): void {
-  const { start, step } = latticeStep(size, coordinate)
   const mask = size - 1
   const perStep = (2 * atoms) / size
   let at = (start + from * step) & mask
-  for (let index = 0; index < block; index += 1) {
-    const folded = at < size / 2 ? at : mask - at
-    values[index] = atom[Math.floor((folded + 0.5) * perStep)] ?? 0
+  for (let point = 0; point < block; point += 1) {
+    const folded = at * 2 < size ? at : mask - at
+    values[point] = atom[((folded + 0.5) * perStep) | 0] ?? 0
     at = (at + step) & mask
   }
 }
 
-/** Share of builds failing, given how much the shared parts leave: exact by what is private, else a step. */
-const failing = (table: Table | null, left: number): number =>
-  table === null ? (left < -samePoint ? 1 : 0) : lookUp(table, -left)
+/** Shares of builds failing one condition, given what the shared parts leave: exact by what is private, else a step. */
+function countFailing(left: Float64Array, table: Table | null, passes: Float64Array, fails: Float64Array): void {
+  for (let point = 0; point < block; point += 1) {
+    const margin = left[point] ?? 0
+    const share = table === null ? (margin < -samePoint ? 1 : 0) : lookUp(table, -margin)
+    passes[point] = (passes[point] ?? 0) * (1 - share)
+    fails[point] = (fails[point] ?? 0) + share
+  }
+}
+
+/** Running sums over all points for the means and the slope of the control. */
+interface Sums {
+  passes: number
+  fails: number
+  failsSquared: number
+  products: number
+}
+
+function addUp(sums: Sums, passes: Float64Array, fails: Float64Array): void {
+  let [sumPasses, sumFails, sumSquares, sumProducts] = [0, 0, 0, 0]
+  for (let point = 0; point < block; point += 1) {
+    const pass = passes[point] ?? 0
+    const fail = fails[point] ?? 0
+    sumPasses += pass
+    sumFails += fail
+    sumSquares += fail * fail
+    sumProducts += fail * pass
+  }
+  sums.passes += sumPasses
+  sums.fails += sumFails
+  sums.failsSquared += sumSquares
+  sums.products += sumProducts
+}
+
+/** What the points say about passing, corrected by how far they miss the known sum of the single failing shares. */
+function correctedMean(sums: Sums, size: number, exactFails: number): number {
+  const passes = sums.passes / size
+  const fails = sums.fails / size
+  const spread = sums.failsSquared / size - fails * fails
+  const slope = spread > 1e-12 ? (sums.products / size - fails * passes) / spread : 0
+  return passes + slope * (exactFails - fails)
+}
 
 /**
  * P(no condition fails), integrated over what conditions share by a lattice, exact in what they do not.
@@ -66,40 +104,38 @@ const failing = (table: Table | null, left: number): number =>
 export function integrateJoint(conditions: readonly OpenCondition[]): number {
   const shared = sharedPartsOf(conditions)
   const size = chooseSize(shared, conditions.length)
-  const atomsOf = shared.map((part) => {
-    const table = tabulate(part.sum)
-    return table === null ? new Float64Array(atoms) : slices(table, atoms)
-  })
-  const privateTables = conditions.map((condition) => tabulate(privatePartOf(condition, shared)))
-  const values = new Float64Array(block)
-  const left = conditions.map(() => new Float64Array(block))
-  let [sumPasses, sumFails, sumFailsSquared, sumProducts] = [0, 0, 0, 0]
-  for (let from = 0; from < size; from += block) {
-    conditions.forEach((condition, index) => left[index]?.fill(condition.dimension.nominal - condition.atLeast))
-    shared.forEach((part, coordinate) => {
-      fillValues(values, from, size, coordinate, atomsOf[coordinate] ?? values)
-      part.ratios.forEach((ratio, index) => {
-        const sums = left[index]
-        if (ratio !== 0 && sums !== undefined) addScaled(sums, values, ratio)
-      })
-    })
-    for (let point = 0; point < block; point += 1) {
-      let passes = 1
-      let fails = 0
-      for (let index = 0; index < conditions.length; index += 1) {
-        const share = failing(privateTables[index] ?? null, left[index]?.[point] ?? 0)
-        passes *= 1 - share
-        fails += share
-      }
-      sumPasses += passes
-      sumFails += fails
-      sumFailsSquared += fails * fails
-      sumProducts += fails * passes
+  const coordinates = shared.map(({ sum, ratios }, index) => {
+    const table = tabulate(sum)
+    return {
+      ratios,
+      step: latticeStep(size, index),
+      atom: table === null ? new Float64Array(atoms) : slices(table, atoms),
     }
+  })
+  const columns = conditions.map((condition) => ({
+    margin: condition.dimension.nominal - condition.atLeast,
+    table: tabulate(privatePartOf(condition, shared)),
+    left: new Float64Array(block),
+  }))
+  const [values, passes, fails] = [new Float64Array(block), new Float64Array(block), new Float64Array(block)]
+  const sums: Sums = { passes: 0, fails: 0, failsSquared: 0, products: 0 }
+  for (let from = 0; from < size; from += block) {
+    for (const { left, margin } of columns) left.fill(margin)
+    for (const { ratios, step, atom } of coordinates) {
+      fillValues(values, atom, step, size, from)
+      columns.forEach(({ left }, index) => {
+        const ratio = ratios[index] ?? 0
+        if (ratio !== 0) addScaled(left, values, ratio)
+      })
+    }
+    passes.fill(1)
+    fails.fill(0)
+    for (const { left, table } of columns) countFailing(left, table, passes, fails)
+    addUp(sums, passes, fails)
   }
-  const [passes, fails] = [sumPasses / size, sumFails / size]
-  const varies = sumFailsSquared / size - fails * fails
-  const slope = varies > 1e-12 ? (sumProducts / size - fails * passes) / varies : 0
-  const exactFails = conditions.reduce((sum, condition) => sum + condition.fails, 0)
-  return passes + slope * (exactFails - fails)
+  return correctedMean(
+    sums,
+    size,
+    conditions.reduce((sum, condition) => sum + condition.fails, 0),
+  )
 }

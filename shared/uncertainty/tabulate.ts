@@ -33,7 +33,7 @@ export function lookUp({ reach, values }: Table, x: number): number {
   const position = ((x + reach) / (2 * reach)) * cells
   if (position <= 0) return 0
   if (position >= cells) return 1
-  const cell = Math.floor(position)
+  const cell = position | 0
   const from = values[cell] ?? 0
   return from + ((values[cell + 1] ?? 1) - from) * (position - cell)
 }

@@ -272,7 +272,7 @@ describe('dimensions', () => {
 
   it('refuse one name with two half-widths', () => {
     expect(() => add(dimension(0, [source('a', 1, 0.1)]), dimension(0, [source('a', 1, 0.2)]))).toThrow(
-      /two half-widths/,
+      /source a is given as uniform ±0.1 and as uniform ±0.2/,
     )
   })
 })
