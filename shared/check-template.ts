@@ -4,6 +4,7 @@ import { reportPieces } from './assembly/report-pieces.ts'
 import type { CheckOptions } from './check-options.ts'
 import { engineVersion, rulesEdition } from './edition.ts'
 import { addFixes } from './fixes/add-fixes.ts'
+import { ImpossiblePiece } from './pieces/impossible-piece.ts'
 import { canonicalJson, digestOf } from './report/digest.ts'
 import type { Report, Summary, Verdict } from './report/report.ts'
 import { applyRules } from './rules/apply-rules.ts'
@@ -218,8 +219,20 @@ export function checkTemplate(text: string, workspace: Workspace, options: Check
     ...optionProblems(reading, options),
   ]
   if (problems.length > 0 || reading.set === null) return invalidReport(reading, text, workspace, options, problems)
-  return checkSet(reading.set, options)
+  try {
+    return checkSet(reading.set, options)
+  } catch (error) {
+    if (!(error instanceof ImpossiblePiece)) throw error
+    return invalidReport(reading, text, workspace, options, [impossible(reading.set, error)])
+  }
 }
+
+const impossible = (set: TemplateSet, { piece, message, hint, key }: ImpossiblePiece): Problem => ({
+  code: 'piece-impossible',
+  message,
+  hint,
+  at: set.placeOf(key === null ? ['pieces', piece] : ['pieces', piece, key]),
+})
 
 /** Names given on the command line must exist in the set's tokens. */
 function optionProblems(reading: SetReading, options: CheckOptions): readonly Problem[] {

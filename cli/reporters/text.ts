@@ -58,7 +58,7 @@ function verdictLines(verdict: Verdict, width: number, paint: Paint): readonly s
   return lines
 }
 
-const inOrder: readonly Verdict['status'][] = ['unchecked', 'info', 'waived', 'warn', 'fail', 'crashed']
+const inOrder: readonly Verdict['status'][] = ['info', 'waived', 'warn', 'fail', 'crashed']
 
 const plural = (count: number, one: string): string => `${String(count)} ${one}`
 
@@ -120,16 +120,26 @@ function reportLines(report: Report, presentation: Presentation, paint: Paint): 
   const width = Math.min(110, Math.max(60, presentation.columns))
   if (report.summary.verdict === 'invalid') return invalidLines(report, width, paint)
   const units = presentation.units ?? report.units
+  const unchecked = report.verdicts.filter((verdict) => verdict.status === 'unchecked')
   const told = report.verdicts
-    .filter((verdict) => verdict.status !== 'pass')
+    .filter((verdict) => verdict.status !== 'pass' && verdict.status !== 'unchecked')
     .toSorted((a, b) => inOrder.indexOf(a.status) - inOrder.indexOf(b.status))
   return [
     ...heading(report, paint),
     '',
     ...report.fits.flatMap((fit) => fitLines(fit, units, presentation.columns, paint)),
     '',
+    ...(unchecked.length === 0
+      ? []
+      : wrapText(
+          paint.quiet(
+            `not checked: ${unchecked.map((verdict) => printable(`${verdict.rule} of ${verdict.subject}`)).join(', ')}`,
+          ),
+          width,
+          '  ',
+        )),
     ...told.flatMap((verdict) => verdictLines(verdict, width, paint)),
-    ...(told.length > 0 ? [''] : []),
+    ...(told.length + unchecked.length > 0 ? [''] : []),
     summaryLine(report, paint),
   ]
 }

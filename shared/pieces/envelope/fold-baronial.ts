@@ -1,3 +1,4 @@
+import { ImpossiblePiece } from '../impossible-piece.ts'
 import type { FoldContext } from '../fold-context.ts'
 import type { EnvelopeForm, FoldedPiece, Measure } from '../folded-piece.ts'
 import {
@@ -37,6 +38,38 @@ function cornerMarks(
   return marks.map((measure) => ({ measure, coefficient: perCorner }))
 }
 
+/** Folds that leave no pocket, or cross outside the square, leave nothing to fold. */
+function requirePocket(
+  given: BaronialByPocket | BaronialByCorners,
+  shape: ReturnType<typeof baronialFromPocket>,
+): void {
+  const key = given.by === 'corners' ? 'corners' : 'pocket'
+  if (shape.along <= 0 || shape.across <= 0) {
+    const hint = 'the distances of two opposite corners must add up to less than twice the side of the square'
+    throw new ImpossiblePiece(given.name, `the folds of ${given.name} leave no pocket between them`, hint, key)
+  }
+  const least = Math.min(...Object.values(shape.notches))
+  if (least < -1e-9) {
+    const hint =
+      'make the square larger or the corner distances longer: two neighbours must add up to at least the side of the square'
+    throw new ImpossiblePiece(
+      given.name,
+      `neighbouring folds of ${given.name} cross outside its square, so a corner of the pocket stays open`,
+      hint,
+      key,
+    )
+  }
+  const reaches = [shape.reach.left + shape.reach.right, shape.reach.bottom + shape.reach.top]
+  if (Math.min(...Object.values(shape.reach)) <= 0 || Math.max(...reaches) >= 2 * shape.halfDiagonal) {
+    throw new ImpossiblePiece(
+      given.name,
+      `a fold of ${given.name} lies off its square`,
+      'every corner distance must be shorter than the side of the square',
+      key,
+    )
+  }
+}
+
 /** A baronial envelope from its pocket or from its square and corners. @see physics B.5 (derived) */
 export function foldBaronial(given: BaronialByPocket | BaronialByCorners, context: FoldContext): FoldedPiece {
   if (given.by === 'pocket' && given.pocket === 'fit') throw new RangeError(`${given.name} has no size yet`)
@@ -47,6 +80,7 @@ export function foldBaronial(given: BaronialByPocket | BaronialByCorners, contex
           given.pocket === 'fit' ? { along: 0, across: 0 } : { along: given.pocket.length, across: given.pocket.width },
           given.seam,
         )
+  requirePocket(given, shape)
   const throatAlong: PlaneAxis = shape.along >= shape.across ? 'length' : 'width'
   const square = measureOf(given.name, 'square', shape.square, 'cut')
   const measures: Measure[] = [square]

@@ -1,122 +1,154 @@
-import { readdirSync, readFileSync } from 'node:fs'
-import { fileURLToPath } from 'node:url'
 import { describe, expect, it } from 'vitest'
 import { checkTemplate } from '../../../shared/check-template.ts'
-import type { Report } from '../../../shared/report/report.ts'
-import { readSet } from '../../../shared/template/read-set.ts'
+import { reportShape } from '../../../shared/report/report-shape.ts'
 import { readWorkspace } from '../../../shared/template/read-workspace.ts'
-import type { TemplateSet } from '../../../shared/template/template-model.ts'
+import { demoSets, demoWorkspace, demoWorkspaceText } from '../../support/demo.ts'
+import { seededRandom } from '../../support/random.ts'
 
-const folder = fileURLToPath(new URL('../../../shared/demo/', import.meta.url))
-const read = (path: string): string => readFileSync(`${folder}${path}`, 'utf8')
-const workspace = readWorkspace(read('foldgauge.yaml'), 'foldgauge.yaml')
-const names = readdirSync(`${folder}sets`).filter((name) => name.endsWith('.yaml'))
-
-const check = (path: string): Report =>
-  checkTemplate(read(path), workspace, { file: path, asOf: '2026-12-01', scales: true })
-
-const reports = new Map(names.map((name) => [name, check(`sets/${name}`)]))
-const sets = names.flatMap((name): readonly TemplateSet[] => {
-  const { set } = readSet(read(`sets/${name}`), name, workspace)
-  return set === null ? [] : [set]
-})
-const pieces = sets.flatMap((set) => [...set.pieces.values()])
-const fits = sets.flatMap((set) => set.fits)
+const asOf = '2026-12-01'
+const workspace = demoWorkspace()
+const check = (set: { file: string; text: string }) => checkTemplate(set.text, workspace, { file: set.file, asOf })
+const reports = demoSets().map(check)
 
 describe('the demo workspace', () => {
-  it('reads without a problem', () => {
+  it('has ten sets in three families, every one passing or waived on purpose', () => {
+    expect(reports.length).toBe(10)
     expect(workspace.problems).toEqual([])
-    expect(names).toHaveLength(10)
+    expect(new Set(reports.map((report) => report.family)).size).toBeGreaterThanOrEqual(3)
+    for (const report of reports) {
+      expect(report.errors, report.set).toEqual([])
+      expect(report.summary.verdict, report.set).toBe('pass')
+    }
+    expect(reports.some((report) => report.units === 'in')).toBe(true)
   })
 
-  it.each([...reports])('passes or is waived on purpose: %s', (_, report) => {
-    expect(report.errors).toEqual([])
-    expect(report.verdicts.filter(({ status }) => status === 'warn' || status === 'fail')).toEqual([])
-    expect(report.summary.crashed).toBe(0)
-    expect(report.summary.verdict).toBe('pass')
+  it('uses every kind of piece and every relation', () => {
+    const kinds = new Set(reports.flatMap((report) => Object.values(report.pieces).map((piece) => piece.kind)))
+    expect([...kinds].toSorted()).toEqual([
+      'bag',
+      'band',
+      'bought',
+      'box',
+      'card',
+      'custom',
+      'divider',
+      'envelope',
+      'insert',
+      'lid',
+      'sleeve',
+    ])
+    expect(new Set(reports.flatMap((report) => report.fits.map((fit) => fit.relation))).size).toBe(3)
+    expect(reports.some((report) => report.verdicts.some((verdict) => verdict.status === 'waived'))).toBe(true)
   })
 
-  it('waives with a reason and only what does not pass by itself', () => {
-    const verdicts = [...reports.values()].flatMap((report) => report.verdicts)
-    const waivers = sets.flatMap((set) => set.waivers)
-    expect(waivers.length).toBeGreaterThanOrEqual(2)
-    expect(verdicts.filter(({ status }) => status === 'waived')).toHaveLength(waivers.length)
-    expect(verdicts.filter(({ rule, status }) => rule.startsWith('waiver/') && status !== 'pass')).toEqual([])
+  it('keeps beside it a copy in which a deepened score makes the lid bind', () => {
+    const [failing] = demoSets('failing').map(check)
+    expect(failing?.summary.verdict).toBe('fail')
+    expect(
+      failing?.verdicts.some((verdict) => verdict.status === 'fail' && verdict.subject.startsWith('lid-on-base')),
+    ).toBe(true)
   })
 
-  it('keeps the usual target and floor, and every requirement at least as strict as it is named', () => {
-    expect(workspace.tokens.target).toBe(0.95)
-    expect(workspace.tokens.floor).toBe(0.85)
-    expect(workspace.tokens.checks.size).toBe(0)
+  it('gives reports that keep to the published shape, whole through JSON', () => {
+    for (const report of [...reports, checkTemplate('pieces: [', workspace, { file: 'x.yaml', asOf })]) {
+      const through: unknown = JSON.parse(JSON.stringify(report))
+      expect(reportShape.safeParse(through).error?.issues ?? []).toEqual([])
+      expect(through).toEqual(report)
+    }
   })
 
-  it('has three families: one metric, one in inches, one for bought envelopes', () => {
-    expect([...workspace.families.keys()]).toEqual(['fernbrook', 'larkspur', 'harbour'])
-    const unitsOf = (family: string): ReadonlySet<string> =>
-      new Set(sets.filter((set) => set.family === family).map((set) => set.tokens.units))
-    expect([...unitsOf('fernbrook')]).toEqual(['mm'])
-    expect([...unitsOf('larkspur')]).toEqual(['in'])
-    const harbour = sets.filter((set) => set.family === 'harbour')
-    expect(harbour.some((set) => [...set.pieces.values()].some((piece) => piece.kind === 'bought'))).toBe(true)
-  })
-
-  it('shows every kind of piece and every way of making one', () => {
-    expect(new Set(pieces.map((piece) => piece.kind))).toEqual(
-      new Set(['card', 'envelope', 'box', 'lid', 'sleeve', 'band', 'bag', 'insert', 'divider', 'bought', 'custom']),
-    )
-    expect(new Set(pieces.map((piece) => piece.made))).toEqual(new Set(['measured', 'printed']))
-    const cards = pieces.flatMap((piece) => (piece.kind === 'card' ? [piece] : []))
-    expect(new Set(cards.map((card) => card.style))).toEqual(new Set(['single', 'roll', 'accordion', 'gate']))
-    expect(new Set(cards.map((card) => card.fold))).toEqual(new Set(['long-edge', 'short-edge', 'none']))
-    expect(cards.some((card) => card.layers.length > 0 && card.raised !== null)).toBe(true)
-    expect(cards.some((card) => card.layers.some((layer) => layer.banner !== null))).toBe(true)
-    expect(cards.some((card) => card.pocket !== null)).toBe(true)
-    expect(cards.some((card) => card.insert !== null)).toBe(true)
-    const envelopes = pieces.flatMap((piece) => (piece.kind === 'envelope' ? [piece] : []))
-    expect(envelopes.some((each) => each.style === 'baronial' && each.by === 'pocket')).toBe(true)
-    expect(envelopes.some((each) => each.style === 'baronial' && each.by === 'corners')).toBe(true)
-    expect(envelopes.some((each) => each.style === 'square-flap' && each.liner !== null)).toBe(true)
-    const trays = pieces.flatMap((piece) => (piece.kind === 'box' || piece.kind === 'lid' ? [piece] : []))
-    expect(trays.some((tray) => tray.walls === 'doubled')).toBe(true)
-    expect(trays.some((tray) => tray.covered !== null)).toBe(true)
-    expect(pieces.some((piece) => piece.kind === 'band' && piece.ribbon)).toBe(true)
-  })
-
-  it('shows every relation, a mixed stack, things that stand, named clearances and makers of its own', () => {
-    expect(new Set(fits.map((fit) => fit.relation))).toEqual(new Set(['in', 'over', 'around']))
-    expect(fits.some((fit) => fit.isStack && fit.put.length > 1)).toBe(true)
-    expect(fits.some((fit) => fit.stands === 'upright')).toBe(true)
-    expect(fits.some((fit) => fit.papers.length > 0)).toBe(true)
-    expect(new Set(fits.flatMap((fit) => fit.clearance?.name ?? []))).toEqual(
-      new Set(workspace.tokens.clearances.keys()),
-    )
-    expect(pieces.some((piece) => piece.workmanship === 'workshop')).toBe(true)
-    expect(sets.some((set) => set.steps !== 'auto')).toBe(true)
-    expect(sets.filter((set) => set.mail !== null).length).toBeGreaterThanOrEqual(3)
-  })
-
-  it('uses every stock it names', () => {
-    const used = [...reports.values()].flatMap((report) => Object.keys(report.inputs.stocks))
-    expect(new Set(used)).toEqual(new Set(workspace.tokens.stocks.keys()))
+  it('gives the same report for the same text', () => {
+    for (const set of demoSets()) expect(check(set)).toEqual(check(set))
   })
 })
 
-describe('the failing copy', () => {
-  const sound = read('sets/fern-notes.yaml')
-  const spoilt = read('failing/fern-notes.yaml')
-  const report = check('failing/fern-notes.yaml')
+describe('ten thousand random mutations of the demo files', () => {
+  const random = seededRandom(20261201)
+  const pick = <T>(from: readonly T[]): T => from[Math.floor(random() * from.length)] as T
+  const snippets = [
+    'fit',
+    ',',
+    ':',
+    '{',
+    '}',
+    '[',
+    ']',
+    '\n',
+    '  ',
+    '- ',
+    '"',
+    '#',
+    '0',
+    '-1',
+    '1e9',
+    '12,5',
+    '1/0',
+    'null',
+    '*a',
+    '&a',
+    '<<: *a',
+    '!!str',
+    '%YAML 1.1\n---\n',
+    '\t',
+    '😀',
+    '\u0000',
+    '..',
+    '±',
+    ' x ',
+    '999999999',
+    'true',
+    'lid',
+    'base',
+    '~',
+  ]
 
-  it('is the sound set but for one score and the comment at its head', () => {
-    const lines = (text: string): readonly string[] => text.split('\n').filter((line) => !line.startsWith('#'))
-    const changed = lines(spoilt).flatMap((line, index) => (line === lines(sound)[index] ? [] : [line.trim()]))
-    expect(changed).toEqual(['lid:  { kind: lid, stock: meadow-270, blank: 192 x 149, wall: 17 }'])
-  })
+  function mutate(text: string): string {
+    const at = Math.floor(random() * text.length)
+    const to = Math.min(text.length, at + Math.floor(random() * 12))
+    switch (Math.floor(random() * 6)) {
+      case 0:
+        return text.slice(0, at) + text.slice(to)
+      case 1:
+        return text.slice(0, at) + pick(snippets) + text.slice(at)
+      case 2:
+        return text.slice(0, at) + pick(snippets) + text.slice(to)
+      case 3: {
+        const lines = text.split('\n')
+        lines.splice(Math.floor(random() * lines.length), 1)
+        return lines.join('\n')
+      }
+      case 4: {
+        const lines = text.split('\n')
+        lines.splice(Math.floor(random() * lines.length), 0, pick(lines))
+        return lines.join('\n')
+      }
+      default:
+        return text.replace(/\d+/g, (number) => (random() < 0.05 ? String(Math.floor(random() * 400)) : number))
+    }
+  }
 
-  it('fails because its lid binds, at the line of that fit', () => {
-    const failed = report.verdicts.filter(({ status }) => status === 'fail')
-    expect(failed.map(({ fingerprint }) => fingerprint)).toContain('fit/clearance#lid-on-base:width')
-    expect(failed.every(({ rule }) => rule === 'fit/clearance')).toBe(true)
-    const place = failed[0]?.at
-    expect(spoilt.split('\n')[(place?.line ?? 0) - 1]?.slice((place?.column ?? 0) - 1)).toMatch(/^lid-on-base:/)
-  })
+  it('end in a report or in problems with their place and remedy, never in an exception', () => {
+    const sets = demoSets()
+    const tokens = demoWorkspaceText()
+    const verdicts: Record<string, number> = {}
+    for (let round = 0; round < 10_000; round += 1) {
+      const set = pick(sets)
+      let text = set.text
+      for (let times = 0; times <= Math.floor(random() * 2); times += 1) text = mutate(text)
+      const held = round % 20 === 0 ? readWorkspace(mutate(tokens), 'foldgauge.yaml') : workspace
+      const report = checkTemplate(text, held, { file: set.file, asOf })
+      verdicts[report.summary.verdict] = (verdicts[report.summary.verdict] ?? 0) + 1
+      if (report.summary.crashed > 0)
+        throw new Error(`${report.verdicts.find((verdict) => verdict.status === 'crashed')?.message ?? ''}\n${text}`)
+      for (const problem of report.errors) {
+        expect(problem.message).not.toBe('')
+        expect(problem.hint).not.toBe('')
+        expect(problem.at.line).toBeGreaterThanOrEqual(1)
+        expect(problem.at.column).toBeGreaterThanOrEqual(1)
+      }
+    }
+    // Both outcomes must have been met, or nothing was mutated.
+    expect(verdicts['invalid'] ?? 0).toBeGreaterThan(1000)
+    expect((verdicts['pass'] ?? 0) + (verdicts['warn'] ?? 0) + (verdicts['fail'] ?? 0)).toBeGreaterThan(1000)
+  }, 240_000)
 })
