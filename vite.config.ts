@@ -17,7 +17,7 @@ export default defineConfig(({ isSsrBuild }) =>
             output: { entryFileNames: '[name].js', chunkFileNames: 'chunks/[name]-[hash].js' },
           },
         },
-        ssr: { noExternal: ['commander', 'zod', 'yaml', 'clipper2-ts', 'tinyglobby'] },
+        ssr: { noExternal: ['commander', 'zod', 'yaml', 'clipper2-ts', 'tinyglobby', 'pdf-lib', 'pako', 'tslib', /^@pdf-lib\//, '@tarikjabiri/dxf'] },
       }
     : {
         plugins: [react(), tailwindcss()],

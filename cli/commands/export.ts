@@ -4,10 +4,8 @@ import { judgeSet } from '../../shared/assembly/judge-set.ts'
 import type { CheckOptions } from '../../shared/check-options.ts'
 import { checkSet, checkTemplate } from '../../shared/check-template.ts'
 import { readPageSize, type PageSize } from '../../shared/drawing/page-size.ts'
-import { bookPages, type BookSet } from '../../shared/exporters/book.ts'
+import type { BookSet } from '../../shared/exporters/book.ts'
 import { editionIn } from '../../shared/exporters/edition.ts'
-import { exportDrawings } from '../../shared/exporters/export-drawings.ts'
-import { exportPdf } from '../../shared/exporters/export-pdf.ts'
 import { exportSet, type ExportSet } from '../../shared/exporters/export-set.ts'
 import { exportSteps } from '../../shared/exporters/export-steps.ts'
 import type { ExportedFile } from '../../shared/exporters/exported-file.ts'
@@ -55,6 +53,9 @@ interface Ready {
   readonly set: ExportSet
   readonly workspace: Workspace
 }
+
+/** Quick packing: a page's lines shrink little more at the slower levels. */
+const deflate = (data: Uint8Array): Uint8Array => deflateSync(data, { level: 3 })
 
 const collect = (value: string, before: readonly string[]): readonly string[] => [...before, value]
 
@@ -108,17 +109,19 @@ function checkPieceNames(set: TemplateSet, names: readonly string[], file: strin
 function prepare(io: Io, input: SetInput, options: Options, judging: Omit<CheckOptions, 'file'>): Ready | ExitCode {
   const { workspace } = input.found
   const checking: CheckOptions = { ...judging, file: input.file }
+  const asWritten = checkTemplate(input.text, workspace, checking)
+  if (asWritten.summary.verdict === 'invalid') return explainProblems(io, asWritten)
   const reading = readSet(input.text, input.file, workspace)
-  if (reading.set === null || reading.problems.length + workspace.problems.length + reading.open.length > 0)
-    return explainProblems(io, checkTemplate(input.text, workspace, checking))
+  if (reading.set === null) return exitCode.defect
   checkPieceNames(reading.set, options.piece, input.file)
   const units: RulerUnit =
     options.units === undefined ? reading.set.tokens.units : oneOf('--units', options.units, ['mm', 'in'])
-  const set = editionIn(reading.set, units, checking)
-  const report = checkSet(set, checking)
+  const isSecondDesign = units !== reading.set.tokens.units
+  const set = isSecondDesign ? editionIn(reading.set, units, checking) : reading.set
+  const report = isSecondDesign ? checkSet(set, checking) : asWritten
   if (report.summary.crashed > 0) return exitCode.defect
   if (report.summary.fail > 0 && options.evenIfFailing !== true) {
-    if (units !== reading.set.tokens.units)
+    if (isSecondDesign)
       io.err(
         `Rounded to the marks of ${units === 'mm' ? 'metric rulers' : 'inch rulers'}, this is a second design, and:\n`,
       )
@@ -157,6 +160,7 @@ async function filesOf(
         ...options.piece,
         document.isLargePrint ? 'large-print' : '',
       ]
+      const { exportPdf } = await import('../../shared/exporters/export-pdf.ts')
       const pages = templateDocument(set, steps, document)
       files.push(
         ...(await exportPdf(pages, {
@@ -165,11 +169,12 @@ async function filesOf(
           author: ready.workspace.title ?? 'Foldgauge',
           digest: set.digest,
           fonts,
-          deflate: deflateSync,
+          deflate,
           isSeparate,
         })),
       )
-    } else
+    } else {
+      const { exportDrawings } = await import('../../shared/exporters/export-drawings.ts')
       files.push(
         ...exportDrawings(set, {
           format,
@@ -178,6 +183,7 @@ async function filesOf(
           pieces: document.pieces,
         }),
       )
+    }
   }
   return files
 }
@@ -201,6 +207,8 @@ async function exportBook(
   }
   const title = first.set.family?.title ?? name
   const books = members.map(({ set }): BookSet => ({ set, steps: planSteps(set) }))
+  const { bookPages } = await import('../../shared/exporters/book.ts')
+  const { exportPdf } = await import('../../shared/exporters/export-pdf.ts')
   const pages = bookPages(books, {
     ...document,
     title,
@@ -216,7 +224,7 @@ async function exportBook(
     author: first.workspace.title ?? 'Foldgauge',
     digest: first.set.digest,
     fonts,
-    deflate: deflateSync,
+    deflate,
     isSeparate: false,
   })
 }
@@ -256,7 +264,8 @@ export const exportCommand: CommandModule = {
     const judging = judgingOptions(io, options)
     const inputs = await findSets(words, io)
     const folder = resolve(io.cwd, options.to)
-    const fonts = wanted.includes('pdf') || options.book !== undefined ? await readDocumentFonts() : []
+    const isPrinted = wanted.includes('pdf') || options.book !== undefined
+    const fonts = isPrinted ? await readDocumentFonts(inputs.map((input) => input.text).join('')) : []
     const progress = progressOf(io, inputs.length)
     const codes: ExitCode[] = []
     const members: Ready[] = []

@@ -7,23 +7,28 @@ import type { DocumentFont } from '../../shared/exporters/pdf/write-pdf.ts'
 
 const require = createRequire(import.meta.url)
 
-/** Latin in two weights, then what accented, Greek and Cyrillic titles need. */
+/** Latin in two weights always; the rest where a text has characters that only they draw. */
 const files = [
-  { subset: 'latin', weight: 400, isBold: false },
-  { subset: 'latin', weight: 700, isBold: true },
-  { subset: 'latin-ext', weight: 400, isBold: false },
-  { subset: 'greek', weight: 400, isBold: false },
-  { subset: 'cyrillic', weight: 400, isBold: false },
+  { subset: 'latin', weight: 400, isBold: false, needed: null },
+  { subset: 'latin', weight: 700, isBold: true, needed: null },
+  { subset: 'latin-ext', weight: 400, isBold: false, needed: /[\u0100-\u024f\u1e00-\u1eff]/u },
+  { subset: 'greek', weight: 400, isBold: false, needed: /[\u0370-\u03ff]/u },
+  { subset: 'cyrillic', weight: 400, isBold: false, needed: /[\u0400-\u04ff]/u },
 ] as const
 
-/** The fonts a printed page embeds, unpacked from the package they come in. */
-export const readDocumentFonts = async (): Promise<readonly DocumentFont[]> =>
+/**
+ * The fonts a printed page embeds, unpacked from the package they come in.
+ * @param text everything authors wrote that will be on the pages
+ */
+export const readDocumentFonts = async (text: string): Promise<readonly DocumentFont[]> =>
   Promise.all(
-    files.map(async ({ subset, weight, isBold }) => {
-      const path = require.resolve(
-        `@fontsource/jetbrains-mono/files/jetbrains-mono-${subset}-${String(weight)}-normal.woff`,
-      )
-      const font = readTrueType(await unpackWoff(readFileSync(path), (data) => inflateSync(data)))
-      return { font, isBold }
-    }),
+    files
+      .filter(({ needed }) => needed === null || needed.test(text))
+      .map(async ({ subset, weight, isBold }) => {
+        const path = require.resolve(
+          `@fontsource/jetbrains-mono/files/jetbrains-mono-${subset}-${String(weight)}-normal.woff`,
+        )
+        const font = readTrueType(await unpackWoff(readFileSync(path), (data) => inflateSync(data)))
+        return { font, isBold }
+      }),
   )

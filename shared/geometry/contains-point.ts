@@ -19,9 +19,16 @@ export function edgesOf(polygon: Polygon): readonly Segment[] {
 /** True where a point lies inside an outline or on its edge, by even-odd crossings. */
 export function containsPoint(polygon: Polygon, p: Point, edgeWidth: Millimetres = samePoint): boolean {
   let isInside = false
-  for (const edge of edgesOf(polygon)) {
-    if (distanceToSegment(p, edge) <= edgeWidth) return true
-    const { from: a, to: b } = edge
+  for (let index = 0; index < polygon.length; index += 1) {
+    const a = polygon[index]
+    const b = polygon[index + 1 === polygon.length ? 0 : index + 1]
+    if (a === undefined || b === undefined) continue
+    const isNear =
+      Math.min(a.x, b.x) - edgeWidth <= p.x &&
+      Math.max(a.x, b.x) + edgeWidth >= p.x &&
+      Math.min(a.y, b.y) - edgeWidth <= p.y &&
+      Math.max(a.y, b.y) + edgeWidth >= p.y
+    if (isNear && distanceToSegment(p, { from: a, to: b }) <= edgeWidth) return true
     if (a.y > p.y !== b.y > p.y && p.x < a.x + ((p.y - a.y) / (b.y - a.y)) * (b.x - a.x)) isInside = !isInside
   }
   return isInside

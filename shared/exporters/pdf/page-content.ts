@@ -15,15 +15,8 @@ export interface PageContent {
   readonly tagged: readonly TaggedText[]
 }
 
-/** Coordinates to a ten-thousandth of a millimetre, without trailing zeros or exponents. */
-function num(value: number): string {
-  const rounded = Math.round(value * 10000) / 10000
-  return Object.is(rounded, -0)
-    ? '0'
-    : Number.isInteger(rounded)
-      ? String(rounded)
-      : rounded.toFixed(4).replace(/0+$/, '')
-}
+/** Coordinates to a ten-thousandth of a millimetre; what is rounded so needs no exponent. */
+const num = (value: number): string => String(Math.round(value * 10000) / 10000 || 0)
 
 const at = ({ x, y }: Point): string => `${num(x)} ${num(y)}`
 

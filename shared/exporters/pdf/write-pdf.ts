@@ -74,6 +74,19 @@ function spotColour(context: PDFContext, layer: LayerName): PDFRef {
   )
 }
 
+/** Labels of a drawing that follow one another are one element; every heading and paragraph is one of its own. */
+function groupTexts(
+  texts: readonly TaggedText[],
+): readonly { readonly role: TaggedText['role']; readonly ids: readonly number[] }[] {
+  const groups: { role: TaggedText['role']; ids: number[] }[] = []
+  for (const { role, id } of texts) {
+    const last = groups[groups.length - 1]
+    if (role === 'label' && last?.role === 'label') last.ids.push(id)
+    else groups.push({ role, ids: [id] })
+  }
+  return groups
+}
+
 /** The tree that gives tagged text its order and role, page by page. */
 function structure(
   context: PDFContext,
@@ -86,11 +99,17 @@ function structure(
   const sections = pageRefs.map((page, index) => {
     const section = context.nextRef()
     const parents: PDFRef[] = []
-    const kids = (tagged[index] ?? []).map(({ id, role }) => {
+    const kids = groupTexts(tagged[index] ?? []).map(({ role, ids }) => {
       const element = context.register(
-        context.obj({ Type: 'StructElem', S: roleTags[role], P: section, Pg: page, K: id }),
+        context.obj({
+          Type: 'StructElem',
+          S: roleTags[role],
+          P: section,
+          Pg: page,
+          K: ids.length === 1 ? (ids[0] ?? 0) : [...ids],
+        }),
       )
-      parents.push(element)
+      ids.forEach(() => parents.push(element))
       return element
     })
     context.assign(section, context.obj({ Type: 'StructElem', S: 'Sect', P: document, K: kids }))

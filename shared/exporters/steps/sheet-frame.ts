@@ -67,14 +67,14 @@ function isCovered(
   edges: readonly Segment[],
 ): boolean {
   const long = Math.hypot(line.to.x - line.from.x, line.to.y - line.from.y)
-  const count = Math.max(8, Math.ceil(long))
+  const count = Math.max(8, Math.ceil(long / 2))
   for (let step = 0; step <= count; step += 1) {
     const share = (step + 0.5) / (count + 1)
     const p = { x: line.from.x + share * (line.to.x - line.from.x), y: line.from.y + share * (line.to.y - line.from.y) }
-    const isScored = scores.some((score) => distanceToSegment(p, score) < 1)
-    const isCut = edges.some((edge) => distanceToSegment(p, edge) < 1.6)
-    const isWaste = waste.some((part) => containsPoint(part, p, 0))
-    if (!isScored && !isCut && !isWaste && containsPoint(outline, p, 0)) return false
+    if (scores.some((score) => distanceToSegment(p, score) < 1)) continue
+    if (edges.some((edge) => distanceToSegment(p, edge) < 1.6) || waste.some((part) => containsPoint(part, p, 0)))
+      continue
+    if (containsPoint(outline, p, 0)) return false
   }
   return true
 }
@@ -112,8 +112,18 @@ function strokesOf(
   })
 }
 
+const known = new WeakMap<Blank, SheetFrame>()
+
 /** Lays a blank as the sheet it is cut from. A square that stands on a corner is laid on its lower right edge. */
 export function sheetFrame(blank: Blank): SheetFrame {
+  const found = known.get(blank)
+  if (found !== undefined) return found
+  const made = layBlank(blank)
+  known.set(blank, made)
+  return made
+}
+
+function layBlank(blank: Blank): SheetFrame {
   const rough = roughSheetOf(blank)
   const turn = rotation(-rough.turn)
   const turned = rough.turn === 0 ? blank.outline : movePolygon(blank.outline, turn)

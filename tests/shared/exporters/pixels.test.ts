@@ -15,7 +15,7 @@ const near = 0.1
 
 let fonts: readonly DocumentFont[] = []
 beforeAll(async () => {
-  fonts = await readDocumentFonts()
+  fonts = await readDocumentFonts('Ωж ł')
 })
 
 /** The true-size page of a piece on the smallest sheet that holds it. */
