@@ -38,7 +38,7 @@ function cornerMarks(
   return marks.map((measure) => ({ measure, coefficient: perCorner }))
 }
 
-/** Folds that leave no pocket, or cross outside the square, leave nothing to fold. */
+/** Folds that leave no pocket or lie off the square leave nothing to fold. Flaps that do not meet are a rule's business. */
 function requirePocket(
   given: BaronialByPocket | BaronialByCorners,
   shape: ReturnType<typeof baronialFromPocket>,
@@ -47,17 +47,6 @@ function requirePocket(
   if (shape.along <= 0 || shape.across <= 0) {
     const hint = 'the distances of two opposite corners must add up to less than twice the side of the square'
     throw new ImpossiblePiece(given.name, `the folds of ${given.name} leave no pocket between them`, hint, key)
-  }
-  const least = Math.min(...Object.values(shape.notches))
-  if (least < -1e-9) {
-    const hint =
-      'make the square larger or the corner distances longer: two neighbours must add up to at least the side of the square'
-    throw new ImpossiblePiece(
-      given.name,
-      `neighbouring folds of ${given.name} cross outside its square, so a corner of the pocket stays open`,
-      hint,
-      key,
-    )
   }
   const reaches = [shape.reach.left + shape.reach.right, shape.reach.bottom + shape.reach.top]
   if (Math.min(...Object.values(shape.reach)) <= 0 || Math.max(...reaches) >= 2 * shape.halfDiagonal) {
