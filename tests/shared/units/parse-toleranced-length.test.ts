@@ -59,6 +59,7 @@ describe('lengths with a tolerance', () => {
   it.each([
     ['0.37 mm ± 100 %', 'tolerance-too-large', 'write a smaller tolerance'],
     ['0.37 mm ± 0.37 mm', 'tolerance-too-large', 'write a smaller tolerance'],
+    ['1 mm +0/-1 mm', 'tolerance-too-large', 'write a smaller tolerance'],
     ['0.37 mm +0/-0.8', 'tolerance-too-large', 'write a smaller tolerance'],
     ['0.37 mm ±', 'tolerance-missing', 'write one, such as ± 5 %'],
     ['0.37 mm ± 5,5 %', 'tolerance-not-understood', 'write it such as 5.5 %'],
