@@ -17,6 +17,7 @@ export interface FormatOptions {
 const greatestCommonDivisor = (a: number, b: number): number => (b === 0 ? a : greatestCommonDivisor(b, a % b))
 
 const decimalText = (value: number, decimals: number): string => {
+  if (Number.isInteger(value) && value !== 0) return String(value)
   const text = String(Number(value.toFixed(decimals)))
   return text === '-0' ? '0' : text
 }

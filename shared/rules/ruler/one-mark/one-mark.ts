@@ -23,9 +23,11 @@ function misreadingsOf(judged: JudgedSet, { axis, marks: all }: MarkedAxis): rea
   const sides = axis.clearance.requirement.isStrict ? ([-1, 1] as const) : ([-1] as const)
   const found: Misreading[] = []
   for (const side of sides) {
-    // A larger step moves the clearance further: once one does no harm, no smaller one does.
+    // A larger step moves the clearance further: once one does no harm, no smaller one does. Most steps are alike.
+    let harmful = Infinity
     for (const mark of marks.toSorted((a, b) => b.step - a.step)) {
-      if (!failsAt(judged, axis, side * mark.step)) break
+      if (harmful - mark.step > 1e-9 && !failsAt(judged, axis, side * mark.step)) break
+      harmful = mark.step
       const by = side * Math.sign(mark.coefficient) * ruler[mark.measure.grid]
       found.push({ ...mark, read: mark.measure.nominal + by })
     }

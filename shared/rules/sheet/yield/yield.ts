@@ -9,7 +9,7 @@ import { cutRectangles, type CutRectangle } from '../sheet-of.ts'
 const effort = { guillotine: ruleLimits.yieldSearched.value, knife: ruleLimits.pinwheelSearched.value }
 
 function judgePiece(judged: JudgedSet, name: string, cut: CutRectangle | undefined): readonly Finding[] {
-  if (cut === undefined) return []
+  if (cut === undefined || cut.rectangle.width <= 0) return []
   const { rectangle, sheet, blank } = cut
   const isPrinted = judged.pieces.get(name)?.given.made === 'printed'
   const strip = isPrinted ? 2 * ruleLimits.printMargin.value : 0
