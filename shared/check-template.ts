@@ -196,8 +196,8 @@ function openProblems(reading: SetReading): readonly Problem[] {
       : [
           {
             code: 'size-open',
-            message: `${path.join('.')} is left open`,
-            hint: 'run `foldgauge size` on this set to work it out, or write the size here',
+            message: `${path.join('.')} is left open.`,
+            hint: 'Run foldgauge size on this set to work it out, or write the size here.',
             at: reading.set.placeOf(path),
           },
         ],
@@ -244,8 +244,8 @@ function optionProblems(reading: SetReading, options: CheckOptions): readonly Pr
       : [
           {
             code: `unknown-${word}`,
-            message: `there is no ${word} called ${name}`,
-            hint: known.size === 0 ? `none is defined here` : `there are ${[...known.keys()].join(', ')}`,
+            message: `There is no ${word} called ${name}.`,
+            hint: known.size === 0 ? 'None is defined here.' : `There are ${[...known.keys()].join(', ')}.`,
             at: set.placeOf([]),
           },
         ]

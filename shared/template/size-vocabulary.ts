@@ -31,7 +31,7 @@ export function createSizeLookup(named: Map<string, GivenSize>, siblings: Readon
       return {
         ok: false,
         code: 'ambiguous-size',
-        fact: `“${name}” alone could be more than one size`,
+        fact: `“${name}” is not a size by itself`,
         remedy: `Write ${offers.map((offer) => `“${offer}”`).join(' or ')}, or define “${name}” under “sizes”`,
       }
     }

@@ -45,15 +45,15 @@ function requirePocket(
 ): void {
   const key = given.by === 'corners' ? 'corners' : 'pocket'
   if (shape.along <= 0 || shape.across <= 0) {
-    const hint = 'the distances of two opposite corners must add up to less than twice the side of the square'
-    throw new ImpossiblePiece(given.name, `the folds of ${given.name} leave no pocket between them`, hint, key)
+    const hint = 'Let the distances of two opposite corners add up to less than twice the side of the square.'
+    throw new ImpossiblePiece(given.name, `The folds of ${given.name} leave no pocket between them.`, hint, key)
   }
   const reaches = [shape.reach.left + shape.reach.right, shape.reach.bottom + shape.reach.top]
   if (Math.min(...Object.values(shape.reach)) <= 0 || Math.max(...reaches) >= 2 * shape.halfDiagonal) {
     throw new ImpossiblePiece(
       given.name,
-      `a fold of ${given.name} lies off its square`,
-      'every corner distance must be shorter than the side of the square',
+      `A fold of ${given.name} lies off its square.`,
+      'Make every corner distance shorter than the side of the square.',
       key,
     )
   }

@@ -19,15 +19,16 @@ export const worksRule: Rule = {
       return [{ ...common, severity: 'unchecked', measure: null, message: `${name} has no fits to go together.` }]
     const worst = judged.fits.toSorted((a, b) => a.closes - b.closes)[0]
     const isGood = judged.works >= tokens.target
-    const sets = `${aboutInWords(judged.works)} ${judged.workmanship}-made sets go together`
+    const words = `${aboutInWords(judged.works)} ${judged.workmanship}-made sets go together`
+    const sets = `${words.charAt(0).toUpperCase()}${words.slice(1)}`
     return [
       {
         ...common,
         severity: isGood ? 'pass' : 'warn',
         measure: { actual: judged.works, limit: tokens.target, sense: 'at-least', unit: 'share' },
         message: isGood
-          ? `${sets.charAt(0).toUpperCase()}${sets.slice(1)}.`
-          : `Only ${sets}, and ${outOfHundred(tokens.target)} of 100 are wanted. ${worst === undefined ? '' : `${worst.fit.id} closes least, in ${outOfHundred(worst.closes)} of 100: begin there.`}`,
+          ? `${sets}.`
+          : `${sets}, and ${outOfHundred(tokens.target)} of 100 are wanted. ${worst === undefined ? '' : `${worst.fit.id} closes least, in ${outOfHundred(worst.closes)} of 100: begin there.`}`,
       },
     ]
   },
