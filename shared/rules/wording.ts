@@ -60,13 +60,11 @@ export function outOfHundred(share: number): string {
   return String(Math.round(builds))
 }
 
-/** A share as people say it: half-widths are guesses, so nothing finer than a few builds in twenty, fifty or a hundred. */
+/** A share as people say it: half-widths are guesses, so nothing finer than one build in twenty. */
 export function aboutInWords(share: number): string {
-  if (share >= 0.9975) return 'nearly all'
-  if (share <= 0.0025) return 'hardly any'
-  const among = share > 0.97 || share < 0.03 ? 100 : share > 0.9 || share < 0.1 ? 20 : 10
-  const builds = Math.min(among - 1, Math.max(1, Math.round(share * among)))
-  return `about ${String(builds)} in ${String(among)}`
+  if (share > 0.995) return 'nearly all'
+  const twentieths = Math.round(share * 20)
+  return twentieths < 1 ? 'hardly any' : `about ${String(Math.min(19, twentieths))} in 20`
 }
 
 /** `home-made`, `studio-made`: whose hands a share speaks of. */
