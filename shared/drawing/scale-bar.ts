@@ -92,8 +92,7 @@ const mmText = (value: number): string => value.toFixed(1)
 
 /** What the bars must measure, in words. */
 export function windowText(lengths: BarLengths, window: PrintWindow | null): string {
-  if (window === null)
-    return `Must measure exactly ${String(lengths.mm)} mm. If it does not, measure with a ruler instead of tracing.`
+  if (window === null) return `Must measure exactly ${String(lengths.mm)} mm; else measure, do not trace.`
   const { min, max } = narrowWindow(window)
   return `Must measure ${mmText(lengths.mm * min)} to ${mmText(lengths.mm * max)} mm, in both directions.`
 }

@@ -187,7 +187,10 @@ export function planSteps(set: ExportSet): readonly Step[] {
       glueStep(lid),
     ]
   })
-  const puts = set.fits.filter((fit) => fit.relation === 'in')
+  // A lid that is put into something stands for its closed box.
+  const isClosedBox = (fit: Fit): boolean => fit.put.some((entry) => lids.has(entry.piece))
+  const puts = set.fits.filter((fit) => fit.relation === 'in' && !isClosedBox(fit))
+  const closed = set.fits.filter((fit) => fit.relation === 'in' && isClosedBox(fit))
   const overs = set.fits.filter((fit) => fit.relation === 'over')
   const wraps = made.filter(isWrap)
   const ribbons = set.pieces.filter((piece) => piece.folded.form.kind === 'band' && piece.folded.form.ribbon)
@@ -220,6 +223,7 @@ export function planSteps(set: ExportSet): readonly Step[] {
             overs.map((fit) => `Set ${fit.put[0]?.piece ?? 'the lid'} on ${fit.to}.`),
           ),
         ]),
+    ...closed.map((fit) => step(`Fill ${fit.to}`, [`Put the closed box in ${fit.to}.`])),
     ...wraps.flatMap((piece) => [
       ...piece.sheets.map((sheet) => cutStep(set, sheet)),
       ...makeSteps(set, piece),

@@ -120,7 +120,7 @@ function drawCover(context: DrawContext, given: BoxGiven, piece: FoldedPiece, fo
         score('turned over the rim', segment(turnIn, y1, turnIn, y2), 180),
         score('turned over the rim', segment(right - turnIn, y1, right - turnIn, y2), 180),
       ],
-      areas: [area('panel', 'cover', rectangle(x1, y1, x2, y2)), area('glue', 'cover', rectangle(x1, y1, x2, y2))],
+      areas: [area('panel', 'cover', rectangle(x1, y1, x2, y2))],
       measures: [
         measure('length', point(0, top), point(right, top)),
         measure('width', point(0, 0), point(0, top)),

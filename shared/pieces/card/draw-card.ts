@@ -199,6 +199,6 @@ export function drawCard(piece: FoldedPiece, given: CardGiven, context: DrawCont
       grain: grainAlong(context, given.stock, lengthRuns),
     }),
     ...given.layers.map((layer, index) => drawLayer(context, layer, `layer ${String(index + 1)}`)),
-    ...drawInsertSheet(context, given, Math.min(...piece.form.panels, panels[0]?.to ?? total), high),
+    ...drawInsertSheet(context, given, holder.to - holder.from, high),
   ]
 }
