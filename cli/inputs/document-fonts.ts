@@ -1,11 +1,18 @@
-import { readFileSync } from 'node:fs'
+import { existsSync, readFileSync } from 'node:fs'
 import { createRequire } from 'node:module'
+import { fileURLToPath } from 'node:url'
 import { inflateSync } from 'node:zlib'
 import { readTrueType } from '../../shared/exporters/pdf/true-type.ts'
 import { unpackWoff } from '../../shared/exporters/pdf/woff.ts'
 import type { DocumentFont } from '../../shared/exporters/pdf/write-pdf.ts'
 
 const require = createRequire(import.meta.url)
+
+/** Built, the fonts lie beside the program; from sources, in the package they come in. */
+function fontPath(name: string): string {
+  const beside = fileURLToPath(new URL(`../fonts/${name}`, import.meta.url))
+  return existsSync(beside) ? beside : require.resolve(`@fontsource/jetbrains-mono/files/${name}`)
+}
 
 /** Latin in two weights always; the rest where a text has characters that only they draw. */
 const files = [
@@ -25,9 +32,7 @@ export const readDocumentFonts = async (text: string): Promise<readonly Document
     files
       .filter(({ needed }) => needed === null || needed.test(text))
       .map(async ({ subset, weight, isBold }) => {
-        const path = require.resolve(
-          `@fontsource/jetbrains-mono/files/jetbrains-mono-${subset}-${String(weight)}-normal.woff`,
-        )
+        const path = fontPath(`jetbrains-mono-${subset}-${String(weight)}-normal.woff`)
         const font = readTrueType(await unpackWoff(readFileSync(path), (data) => inflateSync(data)))
         return { font, isBold }
       }),
