@@ -188,6 +188,8 @@ export function checkSet(set: TemplateSet, options: CheckOptions): Report {
   return reportOf(judged, options.fixes === true ? addFixes(judged, verdicts, rules) : verdicts)
 }
 
+const ruleNames = rules.map((rule) => rule.id)
+
 /** Sizes left open are for sizing; a check asks for them to be sized first. */
 function openProblems(reading: SetReading): readonly Problem[] {
   return reading.open.flatMap((path) =>
@@ -211,7 +213,7 @@ function openProblems(reading: SetReading): readonly Problem[] {
  * @returns always a report; a text that cannot be understood gives one with `errors` and the verdict `invalid`
  */
 export function checkTemplate(text: string, workspace: Workspace, options: CheckOptions): Report {
-  const reading = readSet(text, options.file, workspace)
+  const reading = readSet(text, options.file, workspace, ruleNames)
   const problems = [
     ...workspace.problems,
     ...reading.problems,

@@ -1,4 +1,6 @@
 import { modelDefaults, type ModelDefault } from '../../shared/pieces/model-defaults.ts'
+import { languageDefaults } from '../../shared/pieces/language-defaults.ts'
+import { ruleLimits } from '../../shared/rules/rule-limits.ts'
 import { rules } from '../../shared/rules/rule-registry.ts'
 import { nearestName } from '../../shared/units/did-you-mean.ts'
 import { exitCode } from '../exit-code.ts'
@@ -7,7 +9,7 @@ import { wrapText } from '../reporters/text.ts'
 import type { CommandModule } from './command-module.ts'
 
 const defaultsTable = (): string =>
-  Object.entries(modelDefaults as Readonly<Record<string, ModelDefault>>)
+  Object.entries({ ...modelDefaults, ...languageDefaults, ...ruleLimits } as Readonly<Record<string, ModelDefault>>)
     .map(([name, { value, unit, origin, what }]) =>
       [`${name}: ${String(value)} ${unit} (${origin})`, ...wrapText(what, 78, '  ')].join('\n'),
     )

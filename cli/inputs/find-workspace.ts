@@ -1,7 +1,10 @@
 import { existsSync, readFileSync } from 'node:fs'
 import { dirname, join, relative } from 'node:path'
 import { emptyWorkspace, readWorkspace } from '../../shared/template/read-workspace.ts'
+import { rules } from '../../shared/rules/rule-registry.ts'
 import type { Workspace } from '../../shared/template/template-model.ts'
+
+const ruleNames = rules.map((rule) => rule.id)
 
 export const workspaceFile = 'foldgauge.yaml'
 
@@ -34,7 +37,7 @@ export function workspaceAt(folder: string, cwd: string): FoundWorkspace {
   const known = found.get(file)
   if (known !== undefined) return known
   const text = readFileSync(file, 'utf8')
-  const made = { workspace: readWorkspace(text, relative(cwd, file) || workspaceFile), folder: home, text }
+  const made = { workspace: readWorkspace(text, relative(cwd, file) || workspaceFile, ruleNames), folder: home, text }
   found.set(file, made)
   return made
 }

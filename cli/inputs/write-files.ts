@@ -49,18 +49,20 @@ function checkTargets(folder: string, files: readonly NewFile[], isForced: boole
 export function writeAll(folder: string, files: readonly NewFile[], isForced: boolean): readonly string[] {
   checkTargets(folder, files, isForced)
   const parts: string[] = []
+  let current = folder
   try {
     mkdirSync(folder, { recursive: true })
     for (const { name, content } of files) {
       const part = join(folder, `.${name}.part`)
       parts.push(part)
+      current = join(folder, name)
       writeFileSync(part, content)
     }
   } catch (error) {
     for (const part of parts) rmSync(part, { force: true })
-    const { code = '', path = folder } = error as NodeJS.ErrnoException
+    const { code = '' } = error as NodeJS.ErrnoException
     throw new UsageError(
-      `${path.replace(/\/\.([^/]+)\.part$/, '/$1')} was not written: ${reasons[code] ?? (code === '' ? 'unknown reason' : code)}`,
+      `${current} was not written: ${reasons[code] ?? (code === '' ? 'unknown reason' : code)}`,
       'Nothing was written.',
     )
   }
