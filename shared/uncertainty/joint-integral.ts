@@ -1,13 +1,8 @@
 import { samePoint } from '../geometry/tolerance.ts'
-import type { Condition } from './joint.ts'
+import type { OpenCondition } from './condition.ts'
 import { latticeStep, type LatticeSize, type LatticeStep } from './lattice.ts'
 import { privatePartOf, sharedPartsOf, type SharedPart } from './shared-parts.ts'
 import { lookUp, slices, tabulate, type Table } from './tabulate.ts'
-
-/** A condition with the share of builds that fail it. */
-export interface OpenCondition extends Condition {
-  readonly fails: number
-}
 
 /** Points worked on together, so that what they need stays in the processor's cache. */
 const block = 256

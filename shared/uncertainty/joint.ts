@@ -1,12 +1,7 @@
+import type { Condition, OpenCondition } from './condition.ts'
 import type { Dimension } from './dimension.ts'
 import { distributionOf } from './distribution.ts'
-import { integrateJoint, type OpenCondition } from './joint-integral.ts'
-
-/** A dimension that must be at least so much. */
-export interface Condition {
-  readonly dimension: Dimension
-  readonly atLeast: number
-}
+import { integrateJoint } from './joint-integral.ts'
 
 /** Failing shares below this are nothing. */
 const negligible = 1e-7

@@ -1,7 +1,7 @@
 /**
  * Generating vectors of rank-1 lattices with a power of two of points: point i has the coordinates {i·z/n}.
- * Found component by component as the least worst-case error P₂ with weights falling by 7 % a coordinate (derived with
- * a script of one's own; the method is published and common).
+ * Found component by component as the least worst-case error P₂ with weights falling by 7 % a
+ * coordinate (searched for this project; the method is published and common).
  */
 const generators: ReadonlyMap<number, readonly number[]> = new Map([
   [

@@ -1,5 +1,5 @@
+import type { Condition } from './condition.ts'
 import type { Dimension, Source } from './dimension.ts'
-import type { Condition } from './joint.ts'
 import { variance } from './moments.ts'
 
 /** Ratios nearer than this are one ratio. */
