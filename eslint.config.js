@@ -10,6 +10,8 @@ export default tseslint.config(
     files: ['**/*.{ts,tsx}'],
     languageOptions: { parserOptions: { projectService: true } },
     rules: {
+      // Control characters are looked for on purpose: they must not reach a terminal or a file.
+      'no-control-regex': 'off',
       '@typescript-eslint/no-floating-promises': 'error',
       '@typescript-eslint/no-misused-promises': 'error',
       '@typescript-eslint/consistent-type-imports': 'error',
@@ -19,6 +21,14 @@ export default tseslint.config(
   { files: ['src/**/*.{ts,tsx}'], ...reactHooks.configs.flat.recommended },
   {
     files: ['**/*.{js,mjs}'],
-    languageOptions: { globals: { console: 'readonly', process: 'readonly', URL: 'readonly', setTimeout: 'readonly', Buffer: 'readonly' } },
+    languageOptions: {
+      globals: {
+        console: 'readonly',
+        process: 'readonly',
+        URL: 'readonly',
+        setTimeout: 'readonly',
+        Buffer: 'readonly',
+      },
+    },
   },
 )

@@ -4,7 +4,6 @@ import type { Reporter } from './reporter.ts'
 /** Text for an XML attribute or element; characters that XML 1.0 cannot hold become a question mark. */
 export const escapeXml = (text: string): string =>
   text
-    // eslint-disable-next-line no-control-regex
     .replace(
       /[\u0000-\u0008\u000b\u000c\u000e-\u001f\ufffe\uffff]|[\ud800-\udbff](?![\udc00-\udfff])|(?<![\ud800-\udbff])[\udc00-\udfff]/g,
       '?',

@@ -8,7 +8,6 @@ import { worksSentence } from './text.ts'
 /** Text that cannot become markup, a link, a mention or a table cell of its own. */
 export const escapeMarkdown = (text: string): string =>
   text
-    // eslint-disable-next-line no-control-regex
     .replace(/[\u0000-\u001f\u007f]/g, ' ')
     .replace(/[\\`*_{}[\]()#+!|~-]/g, '\\$&')
     .replaceAll('&', '&amp;')

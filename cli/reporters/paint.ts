@@ -20,6 +20,5 @@ export const paintFor = (hasColour: boolean): Paint =>
     : { bold: same, quiet: same, good: same, wary: same, bad: same }
 
 /** Control characters of a hostile title would move the cursor: they are shown as a question mark. */
-// eslint-disable-next-line no-control-regex
 export const printable = (text: string): string =>
   text.replace(/[\u0000-\u001f\u007f-\u009f\u202a-\u202e\u2066-\u2069]/g, '?')
