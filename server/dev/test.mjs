@@ -4,9 +4,15 @@ import { mkdirSync } from 'node:fs'
 import { join } from 'node:path'
 import { buildCommandLine } from './build.mjs'
 import { installNodePackages } from './node-packages.mjs'
-import { requireNode, root, runStep } from './steps.mjs'
+import { installDebianPackages, requireNode, root, runStep } from './steps.mjs'
 
 requireNode()
+// Other people's programs that read back what is exported, and the browser that pages are looked at in.
+installDebianPackages([
+  { name: 'qpdf', files: ['/usr/bin/qpdf'] },
+  { name: 'poppler-utils', files: ['/usr/bin/pdftoppm'] },
+  { name: 'chromium', files: ['/usr/bin/chromium'] },
+])
 installNodePackages()
 buildCommandLine()
 runStep('Checking types', process.execPath, ['node_modules/typescript/bin/tsc', '-p', 'tsconfig.json'])
