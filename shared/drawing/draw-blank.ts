@@ -1,5 +1,6 @@
 import { areaOf } from '../geometry/area.ts'
 import { boundsOf, heightOf, widthOf } from '../geometry/bounds.ts'
+import { segmentOutside } from '../geometry/clip-segment.ts'
 import { containsPoint } from '../geometry/contains-point.ts'
 import type { Point, Polygon, Segment } from '../geometry/shapes.ts'
 import type { Blank, BlankArea, Score } from '../pieces/blank.ts'
@@ -39,28 +40,6 @@ function centred(layer: LayerName, at: Point, content: string, size: Millimetres
     anchor: 'middle',
     angle,
   })
-}
-
-/** A stroke less what lies under a label's rectangle. */
-function strokeAround({ from, to }: Segment, label: Taken | null): readonly Segment[] {
-  if (label === null) return [{ from, to }]
-  const { left, bottom, right, top } = label.bounds
-  const [dx, dy] = [to.x - from.x, to.y - from.y]
-  let enter = 0
-  let leave = 1
-  for (const [p, q] of [
-    [-dx, from.x - left],
-    [dx, right - from.x],
-    [-dy, from.y - bottom],
-    [dy, top - from.y],
-  ] as const) {
-    if (p === 0 && q < 0) return [{ from, to }]
-    if (p < 0) enter = Math.max(enter, q / p)
-    if (p > 0) leave = Math.min(leave, q / p)
-  }
-  if (enter >= leave) return [{ from, to }]
-  const at = (share: number): Point => ({ x: from.x + share * dx, y: from.y + share * dy })
-  return [...(enter > 0 ? [{ from, to: at(enter) }] : []), ...(leave < 1 ? [{ from: at(leave), to }] : [])]
 }
 
 interface Room {
@@ -107,7 +86,9 @@ function glueMarks(
     return [
       ...(room === null ? [] : [centred('glue', room.at, 'glue', size, room.angle)]),
       ...hatch(area.polygon, hatchSpacing, hatchAngle).flatMap((stroke) =>
-        strokeAround(stroke, room?.taken ?? null).map(({ from, to }) => line('glue', [from, to], { weight: 'plain' })),
+        (room === null ? [stroke] : segmentOutside(stroke, room.taken.bounds)).map(({ from, to }) =>
+          line('glue', [from, to], { weight: 'plain' }),
+        ),
       ),
     ]
   })

@@ -1,7 +1,6 @@
 import { boundsOf, heightOf, widthOf, type Bounds } from '../geometry/bounds.ts'
 import { rectangle } from '../geometry/rectangle.ts'
 import type { Point } from '../geometry/shapes.ts'
-import type { Blank } from '../pieces/blank.ts'
 import type { Millimetres } from '../units/units.ts'
 import { drawBlank } from './draw-blank.ts'
 import { line, text, type Mark } from './drawing.ts'
@@ -12,15 +11,8 @@ import { placeDrawing } from './place-drawing.ts'
 import { roughSheetOf, type RoughEdge } from './rough-sheet.ts'
 import { scaleBlank } from './scale-blank.ts'
 import { charactersIn, clipText, textWidth, wrapText } from './text-width.ts'
+import type { SheetToDraw } from './sheet-to-draw.ts'
 import { tilePages } from './tile-pages.ts'
-
-/** A sheet as its page heads it. */
-export interface SheetToDraw {
-  readonly piece: string
-  readonly blank: Blank
-  readonly copies: number
-  readonly paper: string
-}
 
 export interface PieceOptions {
   /** True-size tiles for a sheet larger than the page. */

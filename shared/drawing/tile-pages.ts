@@ -1,5 +1,6 @@
 import { boundsOf, heightOf, widthOf, type Bounds } from '../geometry/bounds.ts'
-import type { Point, Segment } from '../geometry/shapes.ts'
+import { clipSegment } from '../geometry/clip-segment.ts'
+import type { Point } from '../geometry/shapes.ts'
 import { movePolygon, rotation } from '../geometry/transform.ts'
 import type { Millimetres } from '../units/units.ts'
 import { dashLine } from './dash-line.ts'
@@ -7,7 +8,7 @@ import { drawBlank } from './draw-blank.ts'
 import { line, text, type Mark } from './drawing.ts'
 import { dashFor, lineStyles } from './line-styles.ts'
 import { roomOn, type PageFrame, type PagePlan } from './page-frame.ts'
-import type { SheetToDraw } from './piece-pages.ts'
+import type { SheetToDraw } from './sheet-to-draw.ts'
 import { placeDrawing } from './place-drawing.ts'
 import { roughSheetOf } from './rough-sheet.ts'
 
@@ -17,26 +18,6 @@ const overlap: Millimetres = 10
 /** Number of tiles along a length: ceil((L − o)/(P − o)), one where it fits. @see physics J (derived) */
 export const tileCount = (length: Millimetres, page: Millimetres): number =>
   length <= page + 1e-9 ? 1 : Math.ceil((length - overlap) / (page - overlap) - 1e-9)
-
-/** The part of a segment inside a rectangle; `null` where none is. */
-export function clipSegment({ from, to }: Segment, { left, bottom, right, top }: Bounds): Segment | null {
-  const [dx, dy] = [to.x - from.x, to.y - from.y]
-  let enter = 0
-  let leave = 1
-  for (const [p, q] of [
-    [-dx, from.x - left],
-    [dx, right - from.x],
-    [-dy, from.y - bottom],
-    [dy, top - from.y],
-  ] as const) {
-    if (p === 0 && q < 0) return null
-    if (p < 0) enter = Math.max(enter, q / p)
-    if (p > 0) leave = Math.min(leave, q / p)
-  }
-  if (enter >= leave) return null
-  const at = (share: number): Point => ({ x: from.x + share * dx, y: from.y + share * dy })
-  return { from: at(enter), to: at(leave) }
-}
 
 /** Marks inside a window; dashes are laid first, so that a pattern runs on from tile to tile. */
 function clipMarks(marks: readonly Mark[], window: Bounds): readonly Mark[] {

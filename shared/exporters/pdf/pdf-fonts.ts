@@ -1,4 +1,5 @@
-import { PDFHexString, PDFName, PDFNumber, PDFRawStream, type PDFContext, type PDFRef } from 'pdf-lib'
+import { PDFHexString, PDFNumber, type PDFName, PDFRawStream, type PDFContext, type PDFRef } from 'pdf-lib'
+import { asciiBytes } from './ascii-bytes.ts'
 import type { TrueTypeFont } from './true-type.ts'
 
 /** Bytes made smaller for a PDF's FlateDecode filter: zlib format. */
@@ -64,8 +65,6 @@ export function runsOf(content: string, fonts: readonly UsedFont[]): readonly Te
   return runs
 }
 
-const encoder = new TextEncoder()
-
 /** Map from glyphs back to characters, so that text can be searched, copied and read aloud. */
 function toUnicode(used: UsedFont): Uint8Array {
   const rows = [...used.codePointByGlyph]
@@ -81,7 +80,7 @@ function toUnicode(used: UsedFont): Uint8Array {
     const block = rows.slice(start, start + 100)
     blocks.push(`${String(block.length)} beginbfchar\n${block.join('\n')}\nendbfchar`)
   }
-  return encoder.encode(
+  return asciiBytes(
     `/CIDInit /ProcSet findresource begin\n12 dict begin\nbegincmap\n/CIDSystemInfo << /Registry (Adobe) /Ordering (UCS) /Supplement 0 >> def\n/CMapName /Adobe-Identity-UCS def\n/CMapType 2 def\n1 begincodespacerange\n<0000> <ffff>\nendcodespacerange\n${blocks.join('\n')}\nendcmap\nCMapName currentdict /CMap defineresource pop\nend\nend\n`,
   )
 }

@@ -11,6 +11,7 @@ import {
 import type { LayerName, Page } from '../../drawing/drawing.ts'
 import { layerOrder, layerTitles } from '../../drawing/line-styles.ts'
 import { engineVersion } from '../../edition.ts'
+import { asciiBytes } from './ascii-bytes.ts'
 import { pageContent, roleTags, type TaggedText } from './page-content.ts'
 import { embedFont, streamOf, type Deflate, type UsedFont } from './pdf-fonts.ts'
 import { processingSteps } from './processing-steps.ts'
@@ -37,20 +38,27 @@ export interface PdfOptions {
 }
 
 const points = 72 / 25.4
-const encoder = new TextEncoder()
 
+/** Text in XML of ASCII only: marks of its syntax and every other character by number. */
 const xmlText = (content: string): string =>
   [...content]
-    .filter((character) => character === '\t' || character >= ' ')
+    .filter(
+      (character) =>
+        character === '\t' ||
+        (character >= ' ' && !/[\ud800-\udfff\ufffe\uffff]/.test(character)) ||
+        character.length === 2,
+    )
+    .map((character) =>
+      /[ -~]/.test(character) && !/[&<>"']/.test(character)
+        ? character
+        : `&#${String(character.codePointAt(0) ?? 32)};`,
+    )
     .join('')
-    .replace(/&/g, '&amp;')
-    .replace(/</g, '&lt;')
-    .replace(/>/g, '&gt;')
 
 /** The title and language once more as metadata that search tools read. */
 function metadataOf(options: PdfOptions): Uint8Array {
-  return encoder.encode(
-    `<?xpacket begin="\uFEFF" id="W5M0MpCehiHzreSzNTczkc9d"?>\n<x:xmpmeta xmlns:x="adobe:ns:meta/"><rdf:RDF xmlns:rdf="http://www.w3.org/1999/02/22-rdf-syntax-ns#"><rdf:Description rdf:about="" xmlns:dc="http://purl.org/dc/elements/1.1/"><dc:title><rdf:Alt><rdf:li xml:lang="x-default">${xmlText(options.title)}</rdf:li></rdf:Alt></dc:title><dc:language><rdf:Bag><rdf:li>${xmlText(options.language)}</rdf:li></rdf:Bag></dc:language></rdf:Description></rdf:RDF></x:xmpmeta>\n<?xpacket end="w"?>`,
+  return asciiBytes(
+    `<?xpacket begin="" id="W5M0MpCehiHzreSzNTczkc9d"?>\n<x:xmpmeta xmlns:x="adobe:ns:meta/"><rdf:RDF xmlns:rdf="http://www.w3.org/1999/02/22-rdf-syntax-ns#"><rdf:Description rdf:about="" xmlns:dc="http://purl.org/dc/elements/1.1/"><dc:title><rdf:Alt><rdf:li xml:lang="x-default">${xmlText(options.title)}</rdf:li></rdf:Alt></dc:title><dc:language><rdf:Bag><rdf:li>${xmlText(options.language)}</rdf:li></rdf:Bag></dc:language></rdf:Description></rdf:RDF></x:xmpmeta>\n<?xpacket end="w"?>`,
   )
 }
 
@@ -183,7 +191,7 @@ export async function writePdf(pages: readonly Page[], options: PdfOptions): Pro
   )
   const parent = context.nextRef()
   const pageRefs = pages.map((page, index) => {
-    const stream = context.register(streamOf(context, encoder.encode(contents[index]?.stream ?? ''), options.deflate))
+    const stream = context.register(streamOf(context, asciiBytes(contents[index]?.stream ?? ''), options.deflate))
     return context.register(pageDict(context, page, index, parent, resources, stream))
   })
   context.assign(parent, context.obj({ Type: 'Pages', Kids: pageRefs, Count: pageRefs.length }))

@@ -4,7 +4,8 @@ import type { Fit } from '../../template/template-model.ts'
 import { stockTitle, type ExportPiece, type ExportSet, type ExportSheet } from '../export-set.ts'
 import { fillStep } from './fill-placeholders.ts'
 import { lidTable } from './lid-table.ts'
-import { cutStep, foldStep, notchStep, scoreStep } from './sheet-steps.ts'
+import { notchStep } from './cutting-step.ts'
+import { cutStep, foldStep, scoreStep } from './sheet-steps.ts'
 import { step, type Step } from './step.ts'
 
 const isPresent = <T>(value: T | null): value is T => value !== null

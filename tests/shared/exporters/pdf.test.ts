@@ -235,6 +235,8 @@ describe('the same set', () => {
   })
 })
 
+const printable = (text: string): string => [...text].filter((character) => character >= ' ').join('')
+
 describe('hostile titles', () => {
   const titles = [
     '"><script>alert(1)</script>',
@@ -254,7 +256,7 @@ describe('hostile titles', () => {
       const document = await open(pdf)
       const { info } = (await document.getMetadata()) as unknown as { info: Record<string, unknown> }
       // pdf.js leaves control characters out of what it shows.
-      expect(String(info['Title']).replace(/[\u0000-\u001f]/g, '')).toBe(title.replace(/[\u0000-\u001f]/g, ''))
+      expect(printable(String(info['Title']))).toBe(printable(title))
       if (hasTool('qpdf')) expect(run('qpdf', ['--check'], pdf)).toContain('No syntax')
     }
     const greek = await pdfOf(pagesOf(anExportSet([aCard({ name: 'card' })], { title: 'Сад São Łódź' })), 'x')
