@@ -16,10 +16,28 @@ const quiet = { encoding: 'utf8' as const, stdio: ['ignore', 'pipe', 'pipe'] as 
 it('packs a command line that installs alone in an empty folder and does its work there', () => {
   execFileSync('npm', ['pack', '--ignore-scripts', '--silent', '--pack-destination', home], { ...quiet, cwd: root })
   const [archive = ''] = readdirSync(home).filter((name) => name.endsWith('.tgz'))
-  execFileSync('npm', ['install', '--silent', '--no-audit', '--no-fund', '--offline', '--prefix', join(home, 'there'), join(home, archive)], quiet)
-  expect(readdirSync(join(home, 'there', 'node_modules')).filter((name) => !name.startsWith('.'))).toEqual(['foldgauge'])
+  execFileSync(
+    'npm',
+    [
+      'install',
+      '--silent',
+      '--no-audit',
+      '--no-fund',
+      '--offline',
+      '--prefix',
+      join(home, 'there'),
+      join(home, archive),
+    ],
+    quiet,
+  )
+  expect(readdirSync(join(home, 'there', 'node_modules')).filter((name) => !name.startsWith('.'))).toEqual([
+    'foldgauge',
+  ])
   const run = (...words: readonly string[]): string =>
-    execFileSync(join(home, 'there', 'node_modules', '.bin', 'foldgauge'), [...words], { ...quiet, cwd: join(home, 'there') })
+    execFileSync(join(home, 'there', 'node_modules', '.bin', 'foldgauge'), [...words], {
+      ...quiet,
+      cwd: join(home, 'there'),
+    })
   expect(run('--version')).toContain('foldgauge 1.')
   run('init', 'work', '--card', '148 x 105')
   expect(run('check', 'work/sets')).toContain('PASSES')
