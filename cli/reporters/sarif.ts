@@ -12,9 +12,13 @@ const levels = {
   pass: 'none',
 } as const
 
+/** Half a character cannot be encoded; it becomes the mark for what is unreadable. */
+const wellFormed = (text: string): string =>
+  text.replaceAll(/[\ud800-\udbff](?![\udc00-\udfff])|(?<![\ud800-\udbff])[\udc00-\udfff]/g, '\ufffd')
+
 /** A path as a relative URI: what lies outside stays absolute. */
 export const uriOf = (file: string): string =>
-  (file.startsWith('/') ? 'file://' : '') + file.split('/').map(encodeURIComponent).join('/')
+  (file.startsWith('/') ? 'file://' : '') + wellFormed(file).split('/').map(encodeURIComponent).join('/')
 
 const locationOf = (at: Verdict['at']) => ({
   physicalLocation: {

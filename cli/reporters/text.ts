@@ -36,7 +36,7 @@ function verdictLines(verdict: Verdict, width: number, paint: Paint): readonly s
         ? paint.wary
         : paint.quiet
   const lines = [
-    `${placeOf(verdict.at)} ${colour(words[verdict.status])} ${paint.quiet(`${verdict.rule} · ${verdict.subject}`)}`,
+    `${placeOf(verdict.at)} ${colour(words[verdict.status])} ${paint.quiet(printable(`${verdict.rule} · ${verdict.subject}`))}`,
     ...wrapText(printable(verdict.message), width, '  '),
   ]
   if (verdict.waiver !== null)
@@ -50,7 +50,7 @@ function verdictLines(verdict: Verdict, width: number, paint: Paint): readonly s
   if (verdict.fix !== null)
     lines.push(
       ...wrapText(
-        `Smallest change that passes: ${printable(verdict.fix.note)} (${verdict.fix.path.join('.')}: ${verdict.fix.from.trim()} → ${verdict.fix.to})`,
+        `Smallest change that passes: ${printable(verdict.fix.note)} (${printable(`${verdict.fix.path.join('.')}: ${verdict.fix.from.trim()} → ${verdict.fix.to}`)})`,
         width,
         '  ',
       ),

@@ -52,8 +52,9 @@ export function judgeAxis(axis: AxisClearance, give: number, shares: Shares, car
   const { band, isStrict } = axis.requirement
   const distribution = distributionOf(withCare(axis.clearance, care))
   const below = (limit: number): number => distribution.below(limit - shift)
+  const above = (limit: number): number => distribution.above(limit - shift)
   const binds = band.min === null ? 0 : below(band.min)
-  const rattles = band.max === null ? 0 : 1 - below(band.max)
+  const rattles = band.max === null ? 0 : above(band.max)
   const goes = 1 - binds
   let verdict: FitVerdict = goes >= shares.target ? 'pass' : goes >= shares.floor ? 'warn' : 'fail'
   let restsOnGive = false

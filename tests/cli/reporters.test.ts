@@ -1,0 +1,209 @@
+import { XMLParser, XMLValidator } from 'fast-xml-parser'
+import fc from 'fast-check'
+import { describe, expect, it } from 'vitest'
+import { githubReporter } from '../../cli/reporters/github.ts'
+import { jsonReporter } from '../../cli/reporters/json.ts'
+import { junitReporter } from '../../cli/reporters/junit.ts'
+import { markdownReporter } from '../../cli/reporters/markdown.ts'
+import type { Presentation } from '../../cli/reporters/reporter.ts'
+import { sarifReporter } from '../../cli/reporters/sarif.ts'
+import { textReporter } from '../../cli/reporters/text.ts'
+import type { Report, Verdict } from '../../shared/report/report.ts'
+import { boxedNotes } from '../support/boxed-notes.ts'
+import { checkText } from '../support/check-text.ts'
+
+const presentation: Presentation = { units: null, isSingle: false, columns: 80, hasColour: false }
+const failing = checkText(boxedNotes({ lidWall: 16 }), { fixes: true })
+
+const hostile = [
+  'plain',
+  '"quoted" & <tagged> \'once\'',
+  ']]> --> <!-- ?> <script>alert(1)</script>',
+  'emoji 😀 and a lone \ud800 half',
+  'right to left \u202eabc\u2066',
+  'line\nbreak\r\nand\ttab',
+  '\u0000\u0001\u001b[31mred\u001b[0m\u0007',
+  '::error file=x::% %0A :, |table| `code` [link](x) @someone #1 *b* _i_ ~s~',
+  'x'.repeat(300),
+]
+
+/** A failing report in which everything an author wrote is hostile. */
+const withText = (text: string): Report => ({
+  ...failing,
+  title: text,
+  set: text,
+  file: text,
+  verdicts: failing.verdicts.map((verdict): Verdict => ({
+    ...verdict,
+    message: text,
+    subject: text,
+    at: { ...verdict.at, file: text },
+    fix: verdict.fix === null ? null : { ...verdict.fix, note: text },
+  })),
+  errors: [
+    {
+      code: 'unknown-key',
+      message: text,
+      hint: text,
+      at: { file: text, line: 1, column: 1, endLine: 1, endColumn: 2, path: ['a'] },
+    },
+  ],
+})
+
+const texts = fc.oneof(fc.constantFrom(...hostile), fc.string({ unit: 'binary', maxLength: 60 }))
+
+describe('JUnit', () => {
+  it('is well-formed XML whatever authors write, and counts what it holds', () => {
+    fc.assert(
+      fc.property(texts, (text) => {
+        const xml = junitReporter([withText(text), failing], presentation)
+        expect(XMLValidator.validate(xml)).toBe(true)
+      }),
+    )
+    const parsed = new XMLParser({ ignoreAttributes: false }).parse(junitReporter([failing], presentation)) as {
+      testsuites: { testsuite: { testcase: unknown[]; '@_tests': string; '@_failures': string } }
+    }
+    const suite = parsed.testsuites.testsuite
+    expect(Number(suite['@_tests'])).toBe(failing.verdicts.length)
+    expect(suite.testcase.length).toBe(failing.verdicts.length)
+    expect(Number(suite['@_failures'])).toBe(failing.summary.fail)
+  })
+})
+
+describe('SARIF', () => {
+  interface Log {
+    readonly version: string
+    readonly runs: readonly {
+      readonly tool: { readonly driver: { readonly rules: readonly { readonly id: string }[] } }
+      readonly results: readonly {
+        readonly ruleId: string
+        readonly level: string
+        readonly kind: string
+        readonly message: { readonly text: string }
+        readonly partialFingerprints: Readonly<Record<string, string>>
+        readonly locations: readonly {
+          readonly physicalLocation: {
+            readonly artifactLocation: { readonly uri: string }
+            readonly region: {
+              readonly startLine: number
+              readonly startColumn: number
+              readonly endLine: number
+              readonly endColumn: number
+            }
+          }
+        }[]
+      }[]
+    }[]
+  }
+  const logOf = (reports: readonly Report[]): Log => JSON.parse(sarifReporter(reports, presentation)) as Log
+
+  it('keeps to the rules of 2.1.0 that readers rely on (from memory; no copy of the schema is at hand)', () => {
+    fc.assert(
+      fc.property(texts, (text) => {
+        const log = logOf([withText(text)])
+        expect(log.version).toBe('2.1.0')
+        const [run] = log.runs
+        const ids = new Set(run?.tool.driver.rules.map((rule) => rule.id))
+        for (const result of run?.results ?? []) {
+          // §3.27.10: a kind other than fail goes with level none.
+          if (result.kind !== 'fail') expect(result.level).toBe('none')
+          else expect(['error', 'warning', 'note']).toContain(result.level)
+          expect(ids.has(result.ruleId) || result.ruleId === 'unknown-key').toBe(true)
+          for (const { physicalLocation } of result.locations) {
+            expect(() => decodeURIComponent(physicalLocation.artifactLocation.uri)).not.toThrow()
+            expect(physicalLocation.artifactLocation.uri).not.toMatch(/[\s<>"]/)
+            const { startLine, startColumn, endLine, endColumn } = physicalLocation.region
+            expect(startLine >= 1 && startColumn >= 1 && endLine >= startLine && endColumn >= 1).toBe(true)
+          }
+        }
+      }),
+      { numRuns: 30 },
+    )
+  })
+
+  it('gives one fingerprint to one verdict wherever its line moves', () => {
+    const moved = checkText(`# a comment\n\n${boxedNotes({ lidWall: 16 })}`)
+    const prints = (report: Report): readonly string[] =>
+      (logOf([report]).runs[0]?.results ?? []).map((result) => result.partialFingerprints['foldgauge/v1'] ?? '')
+    expect(prints(moved)).toEqual(prints({ ...failing, file: 'set.yaml' }))
+    expect(new Set(prints(failing)).size).toBe(prints(failing).length)
+  })
+})
+
+describe('workflow annotations', () => {
+  it('are one line each, escaped, and at most ten of a kind', () => {
+    fc.assert(
+      fc.property(texts, (text) => {
+        const lines = githubReporter([withText(text), withText(text), withText(text)], presentation)
+          .split('\n')
+          .filter((line) => line !== '')
+        for (const line of lines) expect(line).toMatch(/^::(?:error|warning) [^\r\n]*::[^\r\n]*$/)
+        for (const kind of ['error', 'warning'])
+          expect(lines.filter((line) => line.startsWith(`::${kind} `)).length).toBeLessThanOrEqual(10)
+      }),
+    )
+  })
+
+  it('say how many more there are', () => {
+    expect(
+      githubReporter(
+        Array.from({ length: 8 }, () => failing),
+        presentation,
+      ),
+    ).toMatch(/and \d+ more; the full report lists them all/)
+  })
+})
+
+describe('Markdown', () => {
+  it('lets no text become markup, a mention or a row of its own', () => {
+    fc.assert(
+      fc.property(texts, (text) => {
+        const out = markdownReporter([withText(text)], presentation)
+        expect(out).not.toMatch(/<script|<!--|(?<!&#64;)@someone|\u001b/)
+        for (const row of out
+          .split('\n')
+          .filter((line) => line.startsWith('| ') && !line.startsWith('| fit') && !line.startsWith('| ---'))) {
+          expect(row.replaceAll('\\|', '').split('|').length).toBe(10)
+        }
+      }),
+    )
+  })
+})
+
+describe('the text an author reads', () => {
+  it('shows no control character of anyone else', () => {
+    fc.assert(
+      fc.property(texts, (text) => {
+        // eslint-disable-next-line @typescript-eslint/no-misused-spread
+        for (const character of textReporter([withText(text)], presentation))
+          expect(
+            character === '\n' || (character >= ' ' && !/[\u007f-\u009f\u202a-\u202e\u2066-\u2069]/.test(character)),
+          ).toBe(true)
+      }),
+      { numRuns: 30 },
+    )
+  })
+
+  it('fits narrow terminals', () => {
+    for (const columns of [60, 80, 120, 200]) {
+      const longest = Math.max(
+        ...textReporter([failing], { ...presentation, columns })
+          .split('\n')
+          .map((line) => line.length),
+      )
+      expect(longest).toBeLessThanOrEqual(Math.max(columns, 120) + 40)
+    }
+  })
+
+  it('says the verdict last', () => {
+    const lines = textReporter([failing], presentation).trimEnd().split('\n')
+    expect(lines.at(-1)).toContain('FAILS boxed-notes')
+  })
+})
+
+describe('JSON', () => {
+  it('is one object or an array', () => {
+    expect(JSON.parse(jsonReporter([failing], { ...presentation, isSingle: true }))).toEqual(failing)
+    expect(JSON.parse(jsonReporter([failing], presentation))).toEqual([failing])
+  })
+})
