@@ -9,6 +9,7 @@ import { sizeSet } from '../../shared/sizing/size-set.ts'
 import { readSet } from '../../shared/template/read-set.ts'
 import { emptyWorkspace } from '../../shared/template/read-workspace.ts'
 import { boxedNotes } from '../support/boxed-notes.ts'
+import { exportRows } from './export-rows.ts'
 
 interface Row {
   readonly what: string
@@ -174,6 +175,8 @@ rows.push({
   limit: 1.3,
   detail: `${late.toFixed(1)} MB against ${early.toFixed(1)} MB`,
 })
+
+rows.push(...(await exportRows(root, heap)))
 
 const width = Math.max(...rows.map((row) => row.what.length))
 for (const { what, ratio, limit, detail } of rows) {

@@ -73,7 +73,7 @@ function plainCutting(blank: Blank, frame: SheetFrame, units: RulerUnit): Cuttin
       ...frame.waste.map((part): StepAction => ({
         do: 'cut-away',
         sheet: blank.name,
-        points: isCurved(part) ? part : part.map(point),
+        points: part.map(point),
       })),
       ...frame.slits.map((slit): StepAction => ({
         do: 'slit',
