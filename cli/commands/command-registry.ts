@@ -35,6 +35,11 @@ export const commandEntries: readonly CommandEntry[] = [
     load: async () => (await import('./init.ts')).initCommand,
   },
   {
+    name: 'migrate',
+    summary: 'bring templates to the present format',
+    load: async () => (await import('./migrate.ts')).migrateCommand,
+  },
+  {
     name: 'completion',
     summary: 'print a completion script for a shell',
     load: async () => (await import('./completion.ts')).completionCommand,
