@@ -1,7 +1,7 @@
 import type { Bounds } from '../geometry/bounds.ts'
 import type { Millimetres } from '../units/units.ts'
 import { line, text, type Mark, type TextRole } from './drawing.ts'
-import { charactersIn, clipText, wrapText } from './text-width.ts'
+import { charactersIn, clipText, textWidth, wrapText } from './text-width.ts'
 
 /** Something that takes a height on a page and draws itself below a point. */
 export interface Block {
@@ -58,7 +58,10 @@ export const heading = (
   role: TextRole = 'heading',
 ): readonly Block[] => [gap(size * 0.5), ...paragraph(content, width, { size, isBold: true, role, keepsNext: true })]
 
-/** A table with rules between its rows; columns as wide as their shares of the width, cells cut to fit. */
+/**
+ * A table with rules between its rows, columns as wide as their shares of the width. Where a cell does not fit its
+ * column, as in large print, every row becomes a sentence of its own instead.
+ */
 export function table(
   head: readonly string[],
   rows: readonly (readonly string[])[],
@@ -67,6 +70,18 @@ export function table(
   size: Millimetres,
 ): readonly Block[] {
   const total = shares.reduce((sum, share) => sum + share, 0)
+  const columnOf = (index: number): Millimetres => (width * (shares[index] ?? 1)) / total - size * 0.8
+  const isTooWide = [head, ...rows].some((cells) =>
+    cells.some((cell, index) => textWidth(cell, size) > columnOf(index)),
+  )
+  if (isTooWide && rows.length > 0) {
+    return rows.flatMap((cells) => {
+      const words = cells.map((cell, index) =>
+        index === 0 ? `${head[0] ?? ''} ${cell}` : `${head[index] ?? ''} ${cell}`,
+      )
+      return paragraph(words.join(' · '), width, { size, indent: size * 1.4, bullet: '-' })
+    })
+  }
   const row = (cells: readonly string[], isHead: boolean): Block =>
     block(
       size * 1.7,
@@ -119,10 +134,11 @@ export function besideFigure(
   })
 }
 
-/** A frame drawn round what must not be missed. */
-export function framed(lines: readonly Block[], width: Millimetres): Block {
+/** A frame drawn round what must not be missed; without one where it would not go on a page in one piece. */
+export function framed(lines: readonly Block[], width: Millimetres, most: Millimetres): readonly Block[] {
   const high = lines.reduce((sum, one) => sum + one.height, 0) + 3
-  return block(high, (left, top) => {
+  if (high > most) return lines
+  const frame = block(high, (left, top) => {
     let y = top - 1
     const marks = lines.flatMap((one) => {
       const drawn = one.draw(left + 2, y)
@@ -144,6 +160,7 @@ export function framed(lines: readonly Block[], width: Millimetres): Block {
       ...marks,
     ]
   })
+  return [frame]
 }
 
 /** Blocks poured down one page after another. */

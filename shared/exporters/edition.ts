@@ -1,8 +1,10 @@
 import { judgeSet } from '../assembly/judge-set.ts'
 import type { CheckOptions } from '../check-options.ts'
+import type { CardGiven } from '../pieces/card/card-given.ts'
 import { languageDefaults } from '../pieces/language-defaults.ts'
 import type { FoldedPiece } from '../pieces/folded-piece.ts'
 import type { PieceGiven } from '../pieces/given.ts'
+import type { GivenSize } from '../pieces/piece-base.ts'
 import type { TemplateSet } from '../template/template-model.ts'
 import { ceilToGrid, roundToGrid } from '../units/grid.ts'
 import type { Millimetres, Ruler, RulerUnit } from '../units/units.ts'
@@ -29,6 +31,34 @@ const bothCut = <T extends { readonly length: Millimetres; readonly width: Milli
   width: marks.cut(size.width),
 })
 
+/** Places of scores set out from one end, from the panels between them. */
+const cumulative = (panels: readonly Millimetres[]): readonly Millimetres[] =>
+  panels.reduce<Millimetres[]>((found, panel) => [...found, (found.at(-1) ?? 0) + panel], [])
+
+/** A card whose fold lies on a mark for scores; panels that fold in are worked out again, each short enough on the new marks. */
+function cardOnMarks(given: CardGiven, marks: Marks): CardGiven {
+  const onMark = (size: GivenSize): GivenSize => {
+    if (given.fold === 'none') return bothCut(size, marks)
+    const isLengthAcross = (given.fold === 'long-edge') === size.length < size.width
+    return {
+      length: isLengthAcross ? marks.score(size.length) : marks.cut(size.length),
+      width: isLengthAcross ? marks.cut(size.width) : marks.score(size.width),
+    }
+  }
+  const { panelWidths } = given
+  return {
+    ...given,
+    folded: given.folded === 'fit' ? given.folded : onMark(given.folded),
+    blank: null,
+    panelWidths: panelWidths === null || given.style === 'roll' ? null : panelWidths.map(marks.score),
+    layers: given.layers.map((layer) => ({
+      ...layer,
+      size: bothCut(layer.size, marks),
+      at: { x: marks.cut(layer.at.x), y: marks.cut(layer.at.y) },
+    })),
+  }
+}
+
 /** A piece with every measure a maker sets on the nearest mark. What is bought or drawn point by point stays as it is. */
 function onMarks(piece: FoldedPiece, marks: Marks, ruler: Ruler): PieceGiven {
   const { given, form, blank } = piece
@@ -44,17 +74,7 @@ function onMarks(piece: FoldedPiece, marks: Marks, ruler: Ruler): PieceGiven {
       return { ...given, by: { given: 'blank', blank: bothCut(blank, marks), wall } }
     }
     case 'card':
-      return {
-        ...given,
-        folded: given.folded === 'fit' ? given.folded : bothCut(given.folded, marks),
-        blank: null,
-        panelWidths: given.panelWidths === null ? null : given.panelWidths.map(marks.score),
-        layers: given.layers.map((layer) => ({
-          ...layer,
-          size: bothCut(layer.size, marks),
-          at: { x: marks.cut(layer.at.x), y: marks.cut(layer.at.y) },
-        })),
-      }
+      return cardOnMarks(given, marks)
     case 'envelope': {
       if (form.kind !== 'envelope') return given
       if (form.style === 'baronial') {
@@ -86,41 +106,43 @@ function onMarks(piece: FoldedPiece, marks: Marks, ruler: Ruler): PieceGiven {
       }
     }
     case 'sleeve': {
-      if (form.kind !== 'sleeve') return given
-      const scores = form.panels
-        .reduce<Millimetres[]>((found, panel) => [...found, (found.at(-1) ?? 0) + panel], [])
-        .map(marks.score)
-      const total = form.panels.reduce((sum, panel) => sum + panel, 0) + form.overlap.nominal
-      return { ...given, blank: { length: marks.cut(total), width: marks.cut(form.length), scores } }
+      // One reckoned from what it goes round is reckoned again, from what that has become.
+      if (form.kind !== 'sleeve' || given.blank === null || given.blank === 'fit') return given
+      const panels = form.panels.map(marks.score)
+      const scores = cumulative(panels)
+      return {
+        ...given,
+        blank: {
+          length: (scores.at(-1) ?? 0) + marks.cut(form.overlap.nominal),
+          width: marks.cut(form.length),
+          scores,
+        },
+      }
     }
     case 'band':
-      return form.kind !== 'band'
-        ? given
-        : {
-            ...given,
-            width: marks.cut(given.width),
-            blank: {
-              length: ceilToGrid(form.stripLength.nominal, ruler.cut),
-              scores: given.blank === null || given.blank === 'fit' ? [] : given.blank.scores.map(marks.score),
-            },
-          }
+      if (given.blank === null || given.blank === 'fit') return { ...given, width: marks.cut(given.width) }
+      return {
+        ...given,
+        width: marks.cut(given.width),
+        blank: { length: ceilToGrid(given.blank.length, ruler.cut), scores: given.blank.scores.map(marks.score) },
+      }
     case 'bag': {
       if (form.kind !== 'bag') return given
-      const { face, gusset, height } = form.panels
-      const scores = [form.seam, form.seam + face, form.seam + face + gusset, form.seam + 2 * face + gusset].map(
-        marks.score,
-      )
+      const [face, gusset, seam] = [
+        marks.score(form.panels.face),
+        marks.score(form.panels.gusset),
+        marks.score(form.seam),
+      ]
       const [top, bottom] = [marks.score(form.top), marks.score(form.bottom)]
       return {
         ...given,
-        inside: given.inside,
         top,
         bottom,
-        seam: scores[0] ?? form.seam,
+        seam,
         blank: {
-          length: marks.cut(form.seam + 2 * (face + gusset)),
-          height: marks.cut(form.top + height + form.bottom),
-          scores,
+          length: seam + 2 * (face + gusset),
+          height: top + marks.cut(form.panels.height) + bottom,
+          scores: cumulative([seam, face, gusset, face]),
         },
       }
     }

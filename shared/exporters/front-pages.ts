@@ -10,6 +10,9 @@ import type { Millimetres } from '../units/units.ts'
 import { stockTitle, type ExportSet } from './export-set.ts'
 import { cautions, tools } from './steps/cautions.ts'
 
+/** Type larger than this leaves no room for tables of figures. */
+const largest: Millimetres = 5
+
 const legendLayers: readonly LayerName[] = layerOrder.filter((layer) => layer !== 'legend')
 
 /** One row of the legend: the line as it is drawn, its word, its letter and what to do with it. */
@@ -17,7 +20,7 @@ function legendRow(layer: LayerName, width: Millimetres, size: Millimetres): Blo
   const style = lineStyles[layer]
   const sample = 30
   return {
-    height: size * 1.9,
+    height: size * (size > largest ? 3.1 : 1.9),
     keepsNext: false,
     draw: (left, top) => {
       const middle = top - size * 0.95
@@ -44,13 +47,15 @@ function legendRow(layer: LayerName, width: Millimetres, size: Millimetres): Blo
       return [
         ...strokes,
         text('legend', { x: left + sample + 4, y: base }, word, size, { isBold: true, role: 'paragraph' }),
-        text('legend', { x: left + sample + 4 + size * 9, y: base }, style.meaning, size, { role: 'paragraph' }),
+        size > largest
+          ? text('legend', { x: left + size, y: base - size * 1.3 }, style.meaning, size, { role: 'paragraph' })
+          : text('legend', { x: left + sample + 4 + size * 9, y: base }, style.meaning, size, { role: 'paragraph' }),
       ].filter((mark) => mark.kind !== 'text' || mark.at.x < left + width)
     },
   }
 }
 
-function scaleBlock(frame: PageFrame, width: Millimetres, size: Millimetres): Block {
+function scaleBlocks(frame: PageFrame, width: Millimetres, size: Millimetres): readonly Block[] {
   const room = roomOn(frame, false)
   const bars = barLengths(room.right - room.left)
   const rows = correctionRows(bars)
@@ -67,22 +72,20 @@ function scaleBlock(frame: PageFrame, width: Millimetres, size: Millimetres): Bl
         inner,
         { size },
       ),
-      ...table(
-        ['if it measures (mm)', ...rows.slice(0, 5).map((row) => row.measured)],
-        [['print at (%)', ...rows.slice(0, 5).map((row) => row.printAt)]],
-        [2.4, 1, 1, 1, 1, 1],
-        inner,
-        size * 0.9,
-      ),
-      ...table(
-        ['if it measures (mm)', ...rows.slice(5).map((row) => row.measured)],
-        [['print at (%)', ...rows.slice(5).map((row) => row.printAt)]],
-        [2.4, 1, 1, 1, 1, 1],
-        inner,
-        size * 0.9,
-      ),
+      ...(size > largest
+        ? rows.flatMap((row) => paragraph(`${row.measured} mm: print at ${row.printAt} %`, inner, { size }))
+        : [rows.slice(0, 5), rows.slice(5)].flatMap((part) =>
+            table(
+              ['if it measures (mm)', ...part.map((row) => row.measured)],
+              [['print at (%)', ...part.map((row) => row.printAt)]],
+              [2.4, 1, 1, 1, 1, 1],
+              inner,
+              size * 0.9,
+            ),
+          )),
     ],
     width,
+    room.top - room.bottom,
   )
 }
 
@@ -135,17 +138,19 @@ export function coverPages(set: ExportSet, frame: PageFrame, size: Millimetres):
       { size },
     ),
     gap(2),
-    scaleBlock(frame, width, size),
+    ...scaleBlocks(frame, width, size),
     ...heading('Pieces', width, size * 1.2),
     ...table(['piece', 'make', 'paper', 'cut to'], [...rows, ...bought, ...ribbons], [3, 1, 3, 3], width, size),
     ...heading('Papers', width, size * 1.2),
-    ...papers.flatMap((name) => paragraph(paperText(name), width, { size, indent: 4, bullet: '-' })),
+    ...papers.flatMap((name) =>
+      paragraph(paperText(name), width, { size, indent: Math.max(4, size * 1.4), bullet: '-' }),
+    ),
     ...heading('Tools', width, size * 1.2),
     ...paragraph(`${tools.join(', ')}.`, width, { size }),
     ...heading('Lines', width, size * 1.2),
     ...legendLayers.map((layer) => legendRow(layer, width, size)),
     ...heading('Take care', width, size * 1.2),
-    ...cautions.flatMap((caution) => paragraph(caution, width, { size, indent: 4, bullet: '-' })),
+    ...cautions.flatMap((caution) => paragraph(caution, width, { size, indent: Math.max(4, size * 1.4), bullet: '-' })),
   ]
   return flowBlocks(blocks, room).map((marks, index) => ({
     title: index === 0 ? 'Start here' : 'Start here, continued',

@@ -19,6 +19,7 @@ function stepBlocks(
   number: number,
   width: Millimetres,
   size: Millimetres,
+  most: Millimetres,
 ): readonly Block[] {
   const blank = one.figure === null ? null : blankNamed(set, one.figure.sheet)
   const hasFigure = one.figure !== null && blank !== null && width > 2.4 * figureWidth
@@ -40,13 +41,14 @@ function stepBlocks(
           ),
         ]),
   ]
-  if (hasFigure) {
+  const high = lines.reduce((sum, each) => sum + each.height, 0)
+  if (hasFigure && high <= most) {
     const figure = drawFigure(blank, one.figure.stage, figureWidth, figureHeight)
     const move = (marks: typeof figure.marks, x: Millimetres, y: Millimetres) =>
       placeDrawing({ marks }, { x, y, turn: 0, scale: 1 })
     return [besideFigure(lines, figure, move, width), gap(size * 0.9)]
   }
-  return one.isStop ? [framed(lines, width), gap(size * 0.9)] : [...lines, gap(size * 0.9)]
+  return one.isStop ? [...framed(lines, width, most), gap(size * 0.9)] : [...lines, gap(size * 0.9)]
 }
 
 /** The steps as pages of a document. @param size body of the type; large print is 22 points and more */
@@ -66,7 +68,7 @@ export function stepsPages(
       { size },
     ),
     gap(size),
-    ...steps.flatMap((one, index) => stepBlocks(set, one, index + 1, width, size)),
+    ...steps.flatMap((one, index) => stepBlocks(set, one, index + 1, width, size, room.top - room.bottom)),
   ]
   return flowBlocks(blocks, room).map((marks, index) => ({
     title: index === 0 ? 'Steps' : 'Steps, continued',

@@ -57,6 +57,29 @@ describe('the demo sets', () => {
   })
 })
 
+describe('large print', () => {
+  it('keeps everything on its pages, in type of at least 22 points for the steps', () => {
+    for (const { file, made } of demo()) {
+      const pages = templateDocument(made, planSteps(made), documentOptions({ isLargePrint: true }))
+      for (const page of pages) {
+        for (const mark of page.marks) {
+          if (mark.kind !== 'text') continue
+          expect(mark.at.y, `${file}, ${page.title}: ${mark.text}`).toBeGreaterThan(5)
+          expect(mark.at.y).toBeLessThan(page.height - 5)
+          if (
+            page.title.startsWith('Steps') &&
+            mark.role === 'paragraph' &&
+            mark.at.y > 24 &&
+            mark.at.y < page.height - 18
+          ) {
+            expect(mark.size).toBeGreaterThanOrEqual(0.85 * 22 * (25.4 / 72))
+          }
+        }
+      }
+    }
+  })
+})
+
 describe('the cut list', () => {
   it('lays every sheet once on paper, none over another, and counts what is left', () => {
     for (const { file, made } of demo()) {
