@@ -1,4 +1,5 @@
 #!/usr/bin/env node
+import { readSync } from 'node:fs'
 import { run } from './run.ts'
 import type { Io } from './io.ts'
 
@@ -7,9 +8,23 @@ const localDay = (date: Date): string => {
   return `${part(date.getFullYear(), 4)}-${part(date.getMonth() + 1, 2)}-${part(date.getDate(), 2)}`
 }
 
+/** Reads standard input at once, without the time a stream takes to set up. @returns false where there is more to wait for */
+function readWaiting(chunks: Buffer[]): boolean {
+  try {
+    for (;;) {
+      const chunk = Buffer.alloc(65_536)
+      const length = readSync(0, chunk)
+      if (length === 0) return true
+      chunks.push(chunk.subarray(0, length))
+    }
+  } catch {
+    return false
+  }
+}
+
 async function readAll(): Promise<string> {
   const chunks: Buffer[] = []
-  for await (const chunk of process.stdin) chunks.push(chunk as Buffer)
+  if (!readWaiting(chunks)) for await (const chunk of process.stdin) chunks.push(chunk as Buffer)
   return Buffer.concat(chunks).toString('utf8')
 }
 
@@ -26,7 +41,9 @@ const io: Io = {
   out: (text) => process.stdout.write(text),
   err: (text) => process.stderr.write(text),
   terminal: { isTerminal: process.stdout.isTTY === true, columns: process.stdout.columns ?? null },
-  showsProgress: process.stderr.isTTY === true && process.env['TERM'] !== 'dumb',
+  get showsProgress() {
+    return process.stderr.isTTY === true && process.env['TERM'] !== 'dumb'
+  },
   readStandardInput: readAll,
 }
 

@@ -1,4 +1,3 @@
-import { Command, CommanderError } from 'commander'
 import { engineVersion, formatNumber, rulesEdition } from '../shared/edition.ts'
 import { nearestName } from '../shared/units/did-you-mean.ts'
 import { commandEntries } from './commands/command-registry.ts'
@@ -34,9 +33,6 @@ function unknownCommand(io: Io, word: string): ExitCode {
   return exitCode.unusable
 }
 
-/** A commander message in our words: lower case, without its prefix. */
-const plain = (message: string): string => message.replace(/^error: /, '').trim()
-
 /** Runs the command line. @returns the exit code; never throws */
 export async function run(words: readonly string[], io: Io): Promise<ExitCode> {
   const [first, ...rest] = words
@@ -52,34 +48,16 @@ export async function run(words: readonly string[], io: Io): Promise<ExitCode> {
   if (entry === undefined) return unknownCommand(io, first)
   try {
     const module = await entry.load()
-    const command = new Command(`foldgauge ${entry.name}`)
-      .description(entry.summary)
-      .exitOverride()
-      .showSuggestionAfterError(true)
-      .configureOutput({
-        writeOut: (text) => {
-          io.out(text)
-        },
-        writeErr: () => undefined,
-      })
-    module.define(command)
-    let code: ExitCode = exitCode.clean
-    command.action(async () => {
-      code = await module.execute(io, command.args, command.opts())
-    })
-    await command.parseAsync([...rest], { from: 'user' })
-    return code
+    const given = module.readPlainly?.(rest) ?? null
+    if (given !== null) return await module.execute(io, given.words, given.options)
+    const { parseAndExecute } = await import('./context/parse-words.ts')
+    return await parseAndExecute(io, entry.name, entry.summary, module, rest)
   } catch (error) {
     return explain(io, entry.name, error)
   }
 }
 
 function explain(io: Io, command: string, error: unknown): ExitCode {
-  if (error instanceof CommanderError) {
-    if (error.exitCode === 0) return exitCode.clean
-    io.err(`foldgauge ${command}: ${plain(error.message)}\nRun foldgauge ${command} --help to see its options.\n`)
-    return exitCode.unusable
-  }
   if (error instanceof UsageError) {
     io.err(`foldgauge ${command}: ${error.message}\n${error.hint === null ? '' : `${error.hint}\n`}`)
     return exitCode.unusable

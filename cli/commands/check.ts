@@ -4,6 +4,7 @@ import type { CheckOptions } from '../../shared/check-options.ts'
 import { checkTemplate } from '../../shared/check-template.ts'
 import type { Report } from '../../shared/report/report.ts'
 import type { RulerUnit } from '../../shared/units/units.ts'
+import { readPlainWords, type OptionUsage } from '../context/plain-words.ts'
 import { progressOf } from '../context/progress.ts'
 import { exitCode, worstExit, type ExitCode } from '../exit-code.ts'
 import { findSets, type SetInput } from '../inputs/find-sets.ts'
@@ -59,13 +60,16 @@ export function oneOf<T extends string>(option: string, text: string, allowed: r
   return found
 }
 
+const judgingUsages: readonly OptionUsage[] = [
+  { flags: '--workmanship <name>', about: 'judge for these makers: home, studio, die, or your own' },
+  { flags: '--paper <stock>', about: 'judge as if every piece were cut from this stock' },
+  { flags: '--scale <percent>', about: 'judge printed pieces at this print scale, such as 97%' },
+  { flags: '--as-of <date>', about: 'judge waivers as of this day (default: today)' },
+]
+
 /** Options that say how a set is judged, shared by every command that judges. */
 export function addJudgingOptions(command: Command): Command {
-  return command
-    .option('--workmanship <name>', 'judge for these makers: home, studio, die, or your own')
-    .option('--paper <stock>', 'judge as if every piece were cut from this stock')
-    .option('--scale <percent>', 'judge printed pieces at this print scale, such as 97%')
-    .option('--as-of <date>', 'judge waivers as of this day (default: today)')
+  return judgingUsages.reduce((sum, { flags, about }) => sum.option(flags, about), command)
 }
 
 /** The engine's options for a file, from the words on the command line. */
@@ -127,21 +131,37 @@ export function presentationOf(io: Io, units: RulerUnit | null, isSingle: boolea
   }
 }
 
+const usages: readonly OptionUsage[] = [
+  {
+    flags: '--report <kind>',
+    about: `${reporterNames.join(', ')}; =FILE writes it there; may be repeated`,
+    isRepeated: true,
+  },
+  { flags: '--single', about: 'with json: one object instead of an array' },
+  { flags: '--against <what>', about: 'also compare with a report, a set, a folder or a git revision' },
+  {
+    flags: '--fail-on <what>',
+    about: 'what makes the exit code 1: fail, warn, or with --against only regression',
+    initial: 'fail',
+  },
+  { flags: '--units <unit>', about: 'lengths in mm or in (default: the units of each set)' },
+  { flags: '--fixes', about: 'work out the smallest change that passes (text always does)' },
+  { flags: '--fix', about: 'apply the smallest changes that pass to the files' },
+  { flags: '--watch', about: 'judge again after every save' },
+  { flags: '--scales', about: 'work out the print scales at which each fit holds' },
+  ...judgingUsages,
+]
+
 export const checkCommand: CommandModule = {
   define(command) {
-    command
-      .argument('[paths...]', 'sets, folders, patterns, or - for standard input')
-      .option('--report <kind>', `${reporterNames.join(', ')}; =FILE writes it there; may be repeated`, collect, [])
-      .option('--single', 'with json: one object instead of an array')
-      .option('--against <what>', 'also compare with a report, a set, a folder or a git revision')
-      .option('--fail-on <what>', 'what makes the exit code 1: fail, warn, or with --against only regression', 'fail')
-      .option('--units <unit>', 'lengths in mm or in (default: the units of each set)')
-      .option('--fixes', 'work out the smallest change that passes (text always does)')
-      .option('--fix', 'apply the smallest changes that pass to the files')
-      .option('--watch', 'judge again after every save')
-      .option('--scales', 'work out the print scales at which each fit holds')
-    addJudgingOptions(command)
+    command.argument('[paths...]', 'sets, folders, patterns, or - for standard input')
+    for (const { flags, about, initial, isRepeated } of usages) {
+      if (isRepeated === true) command.option(flags, about, collect, [])
+      else command.option(flags, about, initial)
+    }
   },
+
+  readPlainly: (words) => readPlainWords(usages, words),
 
   async execute(io, words, given) {
     const options = given as unknown as Options

@@ -10,7 +10,7 @@ export interface Progress {
 
 /** A line on standard error that counts sets, on a terminal and only where there are many. */
 export function progressOf(io: Io, total: number): Progress {
-  if (!io.showsProgress || total < worthShowing) return { step: () => undefined, done: () => undefined }
+  if (total < worthShowing || !io.showsProgress) return { step: () => undefined, done: () => undefined }
   return {
     step(index, name) {
       if (index % 10 === 0) io.err(`\r\u001b[2K${String(index)} of ${String(total)}  ${name.slice(0, 60)}`)
