@@ -6,4 +6,13 @@ import { requireNode, runStep } from './steps.mjs'
 requireNode()
 installNodePackages()
 buildCommandLine()
-runStep('Measuring', process.execPath, ['--expose-gc', '--import', 'tsx', 'tests/bench/bench.ts'], { stdio: 'inherit' })
+runStep('Building the bench', process.execPath, [
+  'node_modules/vite/bin/vite.js',
+  'build',
+  '--ssr',
+  '--mode',
+  'bench',
+  '--logLevel',
+  'warn',
+])
+runStep('Measuring', process.execPath, ['--expose-gc', 'dist/bench/bench.js'], { stdio: 'inherit' })

@@ -1,4 +1,6 @@
-import type { JudgedAxis } from '../assembly/judge-axis.ts'
+import { clearancesOf, type AxisClearance } from '../assembly/clearances.ts'
+import type { SetModel } from '../assembly/set-model.ts'
+import type { Fit } from '../template/template-model.ts'
 import { distributionOf } from '../uncertainty/distribution.ts'
 import type { Dimension } from '../uncertainty/dimension.ts'
 import type { RequiredBand } from '../report/report.ts'
@@ -14,6 +16,13 @@ export interface Least {
   readonly value: number
   readonly unrounded: number
   readonly limitedBy: string
+}
+
+/** One axis of a fit as its author laid it; sizing needs clearances only, not verdicts. @throws where the fit has no such axis */
+export function axisAsLaid(model: SetModel, fit: Fit, axis: string): AxisClearance {
+  const found = clearancesOf(model, fit).orientations[0]?.axes.find((candidate) => candidate.axis === axis)
+  if (found === undefined) throw new RangeError(`${fit.id} has no ${axis}`)
+  return found
 }
 
 /** Whether so many builds keep the least clearance. */
@@ -48,8 +57,8 @@ export function leastValue(bounds: readonly Bound[], start: number, grid: number
 }
 
 /** A requirement in words: `lid-on-base across the width: at least 0.2 mm (slip-lid)`. */
-export const requirementInWords = (fit: string, axis: JudgedAxis): string => {
-  const { band, from } = axis.clearance.requirement
+export const requirementInWords = (fit: string, axis: AxisClearance): string => {
+  const { band, from } = axis.requirement
   const source = from === 'default' ? 'default' : from === 'set' ? 'given with the fit' : from
-  return `${fit}, ${axis.clearance.axis}: at least ${String(band.min ?? 0)} mm (${source})`
+  return `${fit}, ${axis.axis}: at least ${String(band.min ?? 0)} mm (${source})`
 }

@@ -1,4 +1,3 @@
-import { judgeFit } from '../assembly/judge-fit.ts'
 import { modelSet } from '../assembly/set-model.ts'
 import type { BoxGiven } from '../pieces/box/box-given.ts'
 import type { Fit, TemplateSet } from '../template/template-model.ts'
@@ -6,7 +5,7 @@ import { subtract } from '../uncertainty/arithmetic.ts'
 import { ceilToGrid, floorToGrid } from '../units/grid.ts'
 import { modelDefaults } from '../pieces/model-defaults.ts'
 import type { ModelOptions } from '../assembly/set-model.ts'
-import { leastValue, requirementInWords, type Bound, type Least } from './least-value.ts'
+import { axisAsLaid, leastValue, requirementInWords, type Bound, type Least } from './least-value.ts'
 import type { ChosenSize } from './sizing.ts'
 
 /** Share of its base's wall that a lid is given where nothing else asks for more (common practice). */
@@ -56,16 +55,13 @@ function planeBounds(trial: Trial, given: BoxGiven, axis: 'length' | 'width', wa
     const at = (value: number) => {
       const piece =
         axis === 'length' ? boxOf(given, value, value, wall) : boxOf(given, Math.max(roomy, value), value, wall)
-      const judged = judgeFit(modelSet(withGiven(trial.set, piece), trial.options), asLaid)
-      const found = judged.axes.find((candidate) => candidate.clearance.axis === axis)
-      if (found === undefined) throw new RangeError(`${fit.id} has no ${axis}`)
-      return found
+      return axisAsLaid(modelSet(withGiven(trial.set, piece), trial.options), asLaid, axis)
     }
     return {
       requirement: requirementInWords(fit.id, at(roomy)),
       clearanceAt: (value) => {
-        const found = at(value)
-        return { clearance: found.clearance.clearance, band: found.clearance.requirement.band }
+        const { clearance, requirement } = at(value)
+        return { clearance, band: requirement.band }
       },
     }
   })

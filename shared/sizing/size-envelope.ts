@@ -1,4 +1,3 @@
-import { judgeFit } from '../assembly/judge-fit.ts'
 import { modelSet, type ModelOptions } from '../assembly/set-model.ts'
 import type {
   BaronialByCorners,
@@ -8,7 +7,7 @@ import type {
 } from '../pieces/envelope/envelope-given.ts'
 import type { Fit, TemplateSet } from '../template/template-model.ts'
 import { ceilToGrid, floorToGrid } from '../units/grid.ts'
-import { leastValue, requirementInWords, type Bound, type Least } from './least-value.ts'
+import { axisAsLaid, leastValue, requirementInWords, type Bound, type Least } from './least-value.ts'
 import type { SizedPiece, Unsizable } from './size-box.ts'
 
 interface Trial {
@@ -29,17 +28,13 @@ function bounds(trial: Trial, given: Open, axis: 'length' | 'width'): readonly B
     const at = (value: number) => {
       const piece = axis === 'length' ? pocketOf(given, value, value) : pocketOf(given, Math.max(roomy, value), value)
       const set = { ...trial.set, pieces: new Map([...trial.set.pieces, [given.name, piece as EnvelopeGiven]]) }
-      const found = judgeFit(modelSet(set, trial.options), asLaid).axes.find(
-        (candidate) => candidate.clearance.axis === axis,
-      )
-      if (found === undefined) throw new RangeError(`${fit.id} has no ${axis}`)
-      return found
+      return axisAsLaid(modelSet(set, trial.options), asLaid, axis)
     }
     return {
       requirement: requirementInWords(fit.id, at(roomy)),
       clearanceAt: (value) => {
-        const found = at(value)
-        return { clearance: found.clearance.clearance, band: found.clearance.requirement.band }
+        const { clearance, requirement } = at(value)
+        return { clearance, band: requirement.band }
       },
     }
   })

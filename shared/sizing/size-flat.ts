@@ -1,4 +1,3 @@
-import { judgeFit } from '../assembly/judge-fit.ts'
 import { modelSet, type ModelOptions } from '../assembly/set-model.ts'
 import type { BagGiven } from '../pieces/bag/bag-given.ts'
 import type { InsertGiven } from '../pieces/insert/insert-given.ts'
@@ -6,7 +5,7 @@ import type { PieceGiven } from '../pieces/given.ts'
 import type { Fit, TemplateSet } from '../template/template-model.ts'
 import { distributionOf } from '../uncertainty/distribution.ts'
 import { ceilToGrid, floorToGrid } from '../units/grid.ts'
-import { keepsLeast, leastValue, requirementInWords, type Bound } from './least-value.ts'
+import { axisAsLaid, keepsLeast, leastValue, requirementInWords, type Bound } from './least-value.ts'
 import type { SizedPiece, Unsizable } from './size-box.ts'
 import type { ChosenSize } from './sizing.ts'
 
@@ -17,9 +16,7 @@ interface Trial {
 
 const axisOf = (trial: Trial, piece: PieceGiven, fit: Fit, axis: string) => {
   const set = { ...trial.set, pieces: new Map([...trial.set.pieces, [piece.name, piece]]) }
-  return judgeFit(modelSet(set, trial.options), { ...fit, turn: fit.turn ?? 'none' }).axes.find(
-    (candidate) => candidate.clearance.axis === axis,
-  )
+  return axisAsLaid(modelSet(set, trial.options), { ...fit, turn: fit.turn ?? 'none' }, axis)
 }
 
 /** The largest insert or divider that still goes into what holds it, on the cutting grid. */
@@ -51,10 +48,9 @@ export function sizeInsert(whole: TemplateSet, trial: Trial, given: InsertGiven)
     let value = ceilToGrid(start, ruler.cut)
     for (let step = 0; step < 4000 && value > ruler.cut; step += 1) {
       const judged = axisOf(trial, of(value), fit, axis)
-      if (judged === undefined) return null
-      if (keepsLeast(judged.clearance.clearance, judged.clearance.requirement.band, target)) {
-        const least = judged.clearance.requirement.band.min ?? 0
-        const spare = distributionOf(judged.clearance.clearance).quantile(1 - target) - least
+      if (keepsLeast(judged.clearance, judged.requirement.band, target)) {
+        const least = judged.requirement.band.min ?? 0
+        const spare = distributionOf(judged.clearance).quantile(1 - target) - least
         return {
           piece: given.name,
           path: ['pieces', given.name, 'size'],
@@ -116,14 +112,13 @@ export function sizeBag(whole: TemplateSet, trial: Trial, given: BagGiven): Size
           fit,
           axis,
         )
-        if (found === undefined) throw new RangeError(`${fit.id} has no ${axis}`)
         return found
       }
       return {
         requirement: requirementInWords(fit.id, at(roomy)),
         clearanceAt: (value) => ({
-          clearance: at(value).clearance.clearance,
-          band: at(value).clearance.requirement.band,
+          clearance: at(value).clearance,
+          band: at(value).requirement.band,
         }),
       }
     })

@@ -1,7 +1,6 @@
 // Speed as ratios measured in one run: medians of interleaved runs, so that a busy machine slows both sides alike.
 import { spawnSync } from 'node:child_process'
 import { readFileSync } from 'node:fs'
-import { fileURLToPath } from 'node:url'
 import { parseDocument } from 'yaml'
 import { checkSet, checkTemplate } from '../../shared/check-template.ts'
 import { compareReports } from '../../shared/compare/compare-reports.ts'
@@ -54,7 +53,7 @@ function measure(
   })
 }
 
-const root = fileURLToPath(new URL('../../', import.meta.url))
+const root = `${process.cwd()}/`
 const text = boxedNotes()
 const options = { file: 'set.yaml', asOf: '2026-12-01' }
 const workspace = emptyWorkspace()
@@ -150,7 +149,7 @@ measure(
 )
 
 const round = (): void => {
-  readFileSync(new URL('../support/boxed-notes.ts', import.meta.url))
+  readFileSync('tests/support/boxed-notes.ts')
   checkTemplate(text, workspace, { ...options, fixes: true, scales: true })
 }
 measure(
