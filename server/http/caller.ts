@@ -21,6 +21,8 @@ export interface RobotCaller {
   readonly tokenId: string
   readonly teamId: string
   readonly name: string
+  /** Who made the token: their work counts as their own whoever carries it. */
+  readonly makerId: string | null
   readonly scopes: readonly TokenScope[]
 }
 
@@ -32,5 +34,5 @@ export const systemActor: Actor = { kind: 'system', name: 'Foldgauge', personId:
 export const actorOf = (caller: PersonCaller | RobotCaller): Actor => ({
   kind: caller.kind,
   name: caller.name,
-  personId: caller.kind === 'person' ? caller.id : null,
+  personId: caller.kind === 'person' ? caller.id : caller.makerId,
 })

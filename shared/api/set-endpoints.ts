@@ -159,7 +159,10 @@ export const setEndpoints = {
     summary: 'The photograph',
     access: teamMay('sets:read', 'read'),
     params: setPath,
-    query: z.strictObject({ size: z.enum(['full', 'thumbnail']).default('full') }),
+    query: z.strictObject({
+      size: z.enum(['full', 'thumbnail']).default('full'),
+      of: z.string().max(40).optional().describe('changes with the photograph; not looked at'),
+    }),
     answerKind: 'file',
   }),
 } as const

@@ -71,6 +71,7 @@ export class FirstTables1796134561509 implements MigrationInterface {
       `CREATE TABLE "push" ("id" uuid NOT NULL, "team_id" uuid NOT NULL, "content_key" text NOT NULL, "branch" text NOT NULL, "commit" text, "ancestors" text array NOT NULL DEFAULT '{}', "merge_base" text, "link" text, "engine" text NOT NULL, "workspace_file" text, "workspace_digest" text, "actor_kind" text NOT NULL, "actor_name" text NOT NULL, "person_id" uuid, "created_at" TIMESTAMP(3) WITH TIME ZONE NOT NULL DEFAULT now(), CONSTRAINT "PK_ddc3812b04a238cbf8606c12ea6" PRIMARY KEY ("id"))`,
     )
     await runner.query(`CREATE INDEX "push_list" ON "push"  ("team_id", "created_at", "id") `)
+    await runner.query(`CREATE INDEX "push_commit" ON "push"  ("team_id", "commit") `)
     await runner.query(`CREATE UNIQUE INDEX "push_content" ON "push"  ("team_id", "content_key") `)
     await runner.query(
       `CREATE TABLE "comment" ("id" uuid NOT NULL, "team_id" uuid NOT NULL, "version_id" uuid NOT NULL, "number" integer NOT NULL, "anchor_kind" text NOT NULL, "anchor_name" text, "body" text NOT NULL, "person_id" uuid, "written_by" text NOT NULL, "created_at" TIMESTAMP(3) WITH TIME ZONE NOT NULL DEFAULT now(), "resolved_at" TIMESTAMP(3) WITH TIME ZONE, "resolved_by" text, CONSTRAINT "PK_0b0e4bbc8415ec426f87f3a88e2" PRIMARY KEY ("id"))`,
@@ -98,9 +99,6 @@ export class FirstTables1796134561509 implements MigrationInterface {
       `CREATE TABLE "template_set" ("id" uuid NOT NULL, "team_id" uuid NOT NULL, "name" text NOT NULL, "title" text NOT NULL, "family" text, "tags" text array NOT NULL DEFAULT '{}', "state" text NOT NULL DEFAULT 'passing', "state_rank" integer NOT NULL DEFAULT '9', "last_number" integer NOT NULL DEFAULT '0', "shown_version_id" uuid, "pinned_version_id" uuid, "pin_note" text, "pinned_by" text, "is_public" boolean NOT NULL DEFAULT false, "public_key" text, "photo_key" text, "created_at" TIMESTAMP(3) WITH TIME ZONE NOT NULL DEFAULT now(), "updated_at" TIMESTAMP(3) WITH TIME ZONE NOT NULL DEFAULT now(), CONSTRAINT "PK_2a5b1472bd84185e17ccf05e0e9" PRIMARY KEY ("id"))`,
     )
     await runner.query(`CREATE UNIQUE INDEX "template_set_public" ON "template_set"  ("public_key") `)
-    await runner.query(
-      `CREATE INDEX "template_set_list" ON "template_set"  ("team_id", "state_rank", "updated_at", "id") `,
-    )
     await runner.query(`CREATE UNIQUE INDEX "template_set_name" ON "template_set"  ("team_id", "name") `)
     await runner.query(
       `CREATE TABLE "invitation" ("id" uuid NOT NULL, "team_id" uuid NOT NULL, "email" text NOT NULL, "role" text NOT NULL, "secret_hash" bytea, "invited_by" text NOT NULL, "created_at" TIMESTAMP(3) WITH TIME ZONE NOT NULL DEFAULT now(), "expires_at" TIMESTAMP(3) WITH TIME ZONE NOT NULL, "accepted_at" TIMESTAMP(3) WITH TIME ZONE, "revoked_at" TIMESTAMP(3) WITH TIME ZONE, CONSTRAINT "PK_beb994737756c0f18a1c1f8669c" PRIMARY KEY ("id"))`,
@@ -132,7 +130,7 @@ export class FirstTables1796134561509 implements MigrationInterface {
       `CREATE TABLE "throttle" ("key" character varying(255) NOT NULL, "points" integer NOT NULL DEFAULT '0', "expire" bigint, CONSTRAINT "PK_37c6a0c495b370c855a99f75b1c" PRIMARY KEY ("key"))`,
     )
     await runner.query(
-      `CREATE TABLE "branch_state" ("set_id" uuid NOT NULL, "branch" text NOT NULL, "team_id" uuid NOT NULL, "version_id" uuid NOT NULL, "told_failing" text array NOT NULL DEFAULT '{}', "updated_at" TIMESTAMP(3) WITH TIME ZONE NOT NULL DEFAULT now(), CONSTRAINT "PK_aa3028a4905998f462555589baf" PRIMARY KEY ("set_id", "branch"))`,
+      `CREATE TABLE "branch_state" ("set_id" uuid NOT NULL, "branch" text NOT NULL, "team_id" uuid NOT NULL, "version_id" uuid NOT NULL, "told_failing" text array NOT NULL DEFAULT '{}', "workspace_file" text, "workspace_digest" text, "updated_at" TIMESTAMP(3) WITH TIME ZONE NOT NULL DEFAULT now(), CONSTRAINT "PK_aa3028a4905998f462555589baf" PRIMARY KEY ("set_id", "branch"))`,
     )
     await runner.query(`CREATE INDEX "branch_state_team" ON "branch_state"  ("team_id", "branch") `)
     await runner.query(
@@ -398,7 +396,6 @@ export class FirstTables1796134561509 implements MigrationInterface {
     await runner.query(`DROP INDEX "public"."invitation_secret"`)
     await runner.query(`DROP TABLE "invitation"`)
     await runner.query(`DROP INDEX "public"."template_set_name"`)
-    await runner.query(`DROP INDEX "public"."template_set_list"`)
     await runner.query(`DROP INDEX "public"."template_set_public"`)
     await runner.query(`DROP TABLE "template_set"`)
     await runner.query(`DROP INDEX "public"."library_piece_inside"`)
@@ -414,6 +411,7 @@ export class FirstTables1796134561509 implements MigrationInterface {
     await runner.query(`DROP INDEX "public"."comment_version"`)
     await runner.query(`DROP TABLE "comment"`)
     await runner.query(`DROP INDEX "public"."push_content"`)
+    await runner.query(`DROP INDEX "public"."push_commit"`)
     await runner.query(`DROP INDEX "public"."push_list"`)
     await runner.query(`DROP TABLE "push"`)
     await runner.query(`DROP INDEX "public"."push_version_version"`)

@@ -5,6 +5,7 @@ import type { ActorKind } from '../../http/caller.ts'
 /** One push: stored whole or not at all. */
 @Entity({ name: 'push' })
 @Index('push_content', ['teamId', 'contentKey'], { unique: true })
+@Index('push_commit', ['teamId', 'commit'])
 @Index('push_list', ['teamId', 'createdAt', 'id'])
 export class Push {
   @Id() id!: string

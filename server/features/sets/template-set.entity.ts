@@ -4,7 +4,7 @@ import { Flag, Id, Moment, Ref, Text, Texts, Uuid, Whole } from '../../db/column
 /** A set as a team keeps it; what is listed is written here with every version. */
 @Entity({ name: 'template_set' })
 @Index('template_set_name', ['teamId', 'name'], { unique: true })
-@Index('template_set_list', ['teamId', 'stateRank', 'updatedAt', 'id'])
+@Index('template_set_list', { synchronize: false })
 export class TemplateSet {
   @Id() id!: string
   @Ref('Team') teamId!: string

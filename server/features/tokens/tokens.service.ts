@@ -118,5 +118,12 @@ export async function findRobot(context: Context, whole: string): Promise<RobotC
   if (token.revokedAt !== null || token.expiresAt <= now) return null
   if (token.lastUsedAt === null || now.getTime() - token.lastUsedAt.getTime() > minute)
     await manager.update(ApiToken, { id: token.id }, { lastUsedAt: now })
-  return { kind: 'robot', tokenId: token.id, teamId: token.teamId, name: token.name, scopes: token.scopes }
+  return {
+    kind: 'robot',
+    tokenId: token.id,
+    teamId: token.teamId,
+    name: token.name,
+    makerId: token.createdBy,
+    scopes: token.scopes,
+  }
 }

@@ -1,5 +1,5 @@
 import { Entity, ForeignKey, Index, PrimaryColumn } from 'typeorm'
-import { Moment, Ref, Texts } from '../../db/columns.ts'
+import { Moment, Ref, Text, Texts } from '../../db/columns.ts'
 
 /** Where a branch of a set stands. */
 @Entity({ name: 'branch_state' })
@@ -13,5 +13,8 @@ export class BranchState {
   @Ref('Version') versionId!: string
   /** Failures people have been told of; a notice leaves only for others. */
   @Texts({ default: () => "'{}'" }) toldFailing!: string[]
+  /** The workspace it was last judged with, whether or not that changed anything. */
+  @Text({ nullable: true }) workspaceFile!: string | null
+  @Text({ nullable: true }) workspaceDigest!: string | null
   @Moment({ default: () => 'now()' }) updatedAt!: Date
 }
