@@ -1,5 +1,5 @@
 import { execFileSync, spawnSync } from 'node:child_process'
-import { readFileSync } from 'node:fs'
+import { existsSync, readFileSync } from 'node:fs'
 import { fileURLToPath } from 'node:url'
 import { describe, expect, it } from 'vitest'
 
@@ -19,7 +19,11 @@ describe('the layout', () => {
   it('keeps to its import directions and has no cycles', () => {
     const result = spawnSync(
       'node_modules/.bin/depcruise',
-      ['cli', 'server', 'shared', 'src', '--config', '.dependency-cruiser.cjs'],
+      [
+        ...['cli', 'server', 'shared', 'src'].filter((folder) => existsSync(`${root}${folder}`)),
+        '--config',
+        '.dependency-cruiser.cjs',
+      ],
       { cwd: root, encoding: 'utf8' },
     )
     expect(result.stdout).toContain('no dependency violations found')
