@@ -5,6 +5,7 @@ import type { AxisName } from '../report/report.ts'
 import type { Fit } from '../template/template-model.ts'
 import { add, apply, constant, scale, subtract } from '../uncertainty/arithmetic.ts'
 import type { Dimension } from '../uncertainty/dimension.ts'
+import { goesAroundNothing, holdsNothing } from './impossible-fit.ts'
 import type { Load } from './loads.ts'
 import { requirementOf, type FitCase, type Requirement } from './requirements.ts'
 import type { SetModel } from './set-model.ts'
@@ -79,7 +80,7 @@ function tries(fit: Fit, canTurn: boolean): readonly boolean[] {
 
 function intoPocket(fit: Fit, pocket: FoldedPiece, load: Load): FitClearances {
   const cavity = pocket.cavity
-  if (cavity === null) throw new RangeError(`${fit.to} holds nothing`)
+  if (cavity === null) throw holdsNothing(fit, pocket)
   const orientations = tries(fit, true).map((isTurned) => ({
     isTurned,
     axes: (['length', 'width'] as const).map((axis) => {
@@ -98,7 +99,7 @@ function intoPocket(fit: Fit, pocket: FoldedPiece, load: Load): FitClearances {
 
 function intoTray(model: SetModel, fit: Fit, box: FoldedPiece, load: Load): FitClearances {
   const cavity = box.cavity
-  if (cavity === null) throw new RangeError(`${fit.to} holds nothing`)
+  if (cavity === null) throw holdsNothing(fit, box)
   const depth =
     cavity.depth === null || model.hasLid(fit.to)
       ? []
@@ -111,7 +112,7 @@ function intoTray(model: SetModel, fit: Fit, box: FoldedPiece, load: Load): FitC
           }),
         ]
   const headroom = cavity.depth === null ? null : cavity.depth.nominal - load.height.nominal
-  const isDivider = load.stands && fit.stands === null
+  const isDivider = load.stands && model.folded(fit.put[0]?.piece ?? fit.to).given.kind === 'divider'
   if (isDivider) {
     // A divider spans one axis, the one whose inside is nearest its length; where it is loosest it would only fall over.
     const nearest = (['width', 'length'] as const).toSorted(
@@ -153,7 +154,7 @@ function intoTray(model: SetModel, fit: Fit, box: FoldedPiece, load: Load): FitC
 /** Into a bag or through a tube: the two axes of its section, width (face) and depth (gusset). */
 function intoSection(fit: Fit, outer: FoldedPiece, load: Load, fitCase: 'bag' | 'sleeve'): FitClearances {
   const cavity = outer.cavity
-  if (cavity?.depth == null) throw new RangeError(`${fit.to} holds nothing`)
+  if (cavity?.depth == null) throw holdsNothing(fit, outer)
   const face = cavity.length
   const gusset = cavity.width
   // Things stand in a bag unless the author lays them flat.
@@ -185,7 +186,7 @@ function intoSection(fit: Fit, outer: FoldedPiece, load: Load, fitCase: 'bag' | 
 
 function sleeveAround(model: SetModel, fit: Fit, sleeve: FoldedPiece, inner: string): FitClearances {
   const cavity = sleeve.cavity
-  if (cavity?.depth == null || sleeve.form.kind !== 'sleeve') throw new RangeError(`${sleeve.given.name} is no sleeve`)
+  if (cavity?.depth == null || sleeve.form.kind !== 'sleeve') throw goesAroundNothing(fit, sleeve, inner)
   const around = model.closed(inner)
   const axis = sleeve.form.wrapped
   return {
@@ -242,7 +243,7 @@ function wrapAround(model: SetModel, fit: Fit, band: FoldedPiece): FitClearances
 function lidOver(model: SetModel, fit: Fit, lid: FoldedPiece): FitClearances {
   const base = model.folded(fit.to)
   const cavity = lid.cavity
-  if (cavity === null) throw new RangeError(`${lid.given.name} has no inside`)
+  if (cavity === null) throw holdsNothing(fit, lid)
   const seat = model.seat(fit.to)
   const isTurned = fit.turn === 'quarter'
   const sides = (['length', 'width'] as const).map((axis) => {

@@ -113,7 +113,7 @@ export function loadOf(model: SetModel, fit: Fit): Load {
           height,
         }
   const isDivider = first.piece.form.kind === 'insert' && first.piece.form.standing
-  const stands = isDivider || fit.stands === 'upright'
+  const stands = fit.stands === null ? isDivider : fit.stands === 'upright'
   const pressed = add(
     ...units.map((unit) =>
       scale(
