@@ -28,7 +28,8 @@ export const segment = (x1: Millimetres, y1: Millimetres, x2: Millimetres, y2: M
 })
 
 export const score = (name: string, line: Segment, angle: number, fold: Score['fold'] = 'valley'): Score => ({
-  ...line,
+  from: line.from,
+  to: line.to,
   name,
   fold,
   angle,
@@ -44,22 +45,51 @@ export const measure = (name: string, from: Point, to: Point): BlankMeasure => (
   length: Math.hypot(to.x - from.x, to.y - from.y),
 })
 
-type Parts = Pick<Blank, 'name' | 'stock' | 'outline'> & Partial<Blank>
+type Parts = Pick<Blank, 'name' | 'stock' | 'outline'> &
+  Partial<Omit<Blank, 'areas' | 'measures'>> & {
+    readonly areas?: () => readonly BlankArea[]
+    readonly measures?: () => readonly BlankMeasure[]
+  }
 
-/** A blank with its lower left at the origin and its outline counter-clockwise; parts not given are empty. */
+/** Most sheets are drawn with their lower left at the origin already; they are taken as they are. */
+const where = <T>(isMoved: boolean, parts: readonly T[] | undefined, move: (part: T) => T): readonly T[] =>
+  parts === undefined ? [] : isMoved ? parts.map(move) : parts
+
+/**
+ * A blank with its lower left at the origin and its outline counter-clockwise; parts not given are empty. Areas and
+ * measures are for pages only: they are worked out when first looked at.
+ */
 export function makeBlank(parts: Parts): Blank {
   const bounds = boundsOf(parts.outline)
+  const isMoved = bounds.left !== 0 || bounds.bottom !== 0
   const move = translation(-bounds.left, -bounds.bottom)
+  const polygon = (outline: Polygon): Polygon => movePolygon(outline, move)
+  const line = <T extends Segment>(segment: T): T => moveSegment(segment, move)
+  const outline = counterClockwise(parts.outline)
+  let areas: readonly BlankArea[] | null = null
+  let measures: readonly BlankMeasure[] | null = null
   return {
     name: parts.name,
     stock: parts.stock,
-    outline: movePolygon(counterClockwise(parts.outline), move),
-    holes: (parts.holes ?? []).map((hole) => movePolygon(hole, move)),
-    scores: (parts.scores ?? []).map((line) => moveSegment(line, move)),
-    cuts: (parts.cuts ?? []).map((line) => moveSegment(line, move)),
-    perforations: (parts.perforations ?? []).map((line) => moveSegment(line, move)),
-    areas: (parts.areas ?? []).map((part) => ({ ...part, polygon: movePolygon(part.polygon, move) })),
-    measures: (parts.measures ?? []).map((line) => moveSegment(line, move)),
+    outline: isMoved ? polygon(outline) : outline,
+    holes: where(isMoved, parts.holes, polygon),
+    scores: where(isMoved, parts.scores, ({ from, to, name, fold, angle }) => ({
+      from: move.point(from),
+      to: move.point(to),
+      name,
+      fold,
+      angle,
+    })),
+    cuts: where(isMoved, parts.cuts, line),
+    perforations: where(isMoved, parts.perforations, line),
+    get areas() {
+      areas ??= where(isMoved, parts.areas?.(), (part) => ({ ...part, polygon: polygon(part.polygon) }))
+      return areas
+    },
+    get measures() {
+      measures ??= where(isMoved, parts.measures?.(), line)
+      return measures
+    },
     grain: parts.grain ?? null,
   }
 }

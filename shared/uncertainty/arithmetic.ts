@@ -57,48 +57,58 @@ export function dimension(nominal: number, sources: readonly Source[]): Dimensio
   return { nominal, sources: alive(merged) }
 }
 
-/** Σ of dimensions times factors, coefficients added by source name. */
-function combine(terms: readonly (readonly [Dimension, number])[], constantPart = 0): Dimension {
+const firstOf = (term: Dimension, factor: number): Source[] => {
+  const merged: Source[] = []
+  for (const entry of term.sources) merged.push(times(entry, factor))
+  return merged
+}
+
+/** Adds a dimension times a factor to a list of sources. */
+function collectAll(into: Source[], term: Dimension, factor: number): void {
+  for (const entry of term.sources) collect(into, entry, factor)
+}
+
+/** Sum of dimensions; sources of one name are added up. */
+export function add(...dimensions: readonly Dimension[]): Dimension {
   let merged: Source[] | null = null
-  let nominal = constantPart
-  for (const [term, factor] of terms) {
-    nominal += term.nominal * factor
-    if (merged === null) merged = term.sources.map((entry) => times(entry, factor))
-    else for (const entry of term.sources) collect(merged, entry, factor)
+  let nominal = 0
+  for (const term of dimensions) {
+    nominal += term.nominal
+    if (merged === null) merged = firstOf(term, 1)
+    else collectAll(merged, term, 1)
   }
   return { nominal, sources: alive(merged ?? []) }
 }
 
-/** Sum of dimensions; sources of one name are added up. */
-export const add = (...dimensions: readonly Dimension[]): Dimension =>
-  combine(dimensions.map((term) => [term, 1] as const))
+/** Two dimensions times a factor each, and a constant; what they share adds up or cancels by name. */
+function combine(a: Dimension, factorA: number, b: Dimension, factorB: number, constantPart = 0): Dimension {
+  const merged = firstOf(a, factorA)
+  collectAll(merged, b, factorB)
+  return { nominal: constantPart + a.nominal * factorA + b.nominal * factorB, sources: alive(merged) }
+}
 
 /** One dimension less another; what they share cancels as far as their coefficients agree. */
-export const subtract = (from: Dimension, less: Dimension): Dimension =>
-  combine([
-    [from, 1],
-    [less, -1],
-  ])
+export const subtract = (from: Dimension, less: Dimension): Dimension => combine(from, 1, less, -1)
 
 /** A dimension times a number. */
-export const scale = (of: Dimension, factor: number): Dimension => combine([[of, factor]])
+export const scale = (of: Dimension, factor: number): Dimension => ({
+  // Adding nothing turns the minus zero of −2 × 0 into zero.
+  nominal: 0 + of.nominal * factor,
+  sources: alive(firstOf(of, factor)),
+})
 
 /** The same dimension with its nominal moved. */
 export const shift = (of: Dimension, by: number): Dimension => ({ nominal: of.nominal + by, sources: of.sources })
 
 /** Product of two dimensions, linearised at the nominal: what is of second order in the sources is left out. */
 export const multiply = (a: Dimension, b: Dimension): Dimension =>
-  combine(
-    [
-      [a, b.nominal],
-      [b, a.nominal],
-    ],
-    -a.nominal * b.nominal,
-  )
+  combine(a, b.nominal, b, a.nominal, -a.nominal * b.nominal)
 
 /** A function of one dimension, linearised: its value at the nominal and its derivative there. */
-export const apply = (of: Dimension, value: number, derivative: number): Dimension =>
-  combine([[of, derivative]], value - of.nominal * derivative)
+export const apply = (of: Dimension, value: number, derivative: number): Dimension => ({
+  nominal: value - of.nominal * derivative + of.nominal * derivative,
+  sources: alive(firstOf(of, derivative)),
+})
 
 /** The nominally larger of two, with its sources; the first where they are equal. */
 export const larger = (a: Dimension, b: Dimension): Dimension => (b.nominal > a.nominal ? b : a)

@@ -29,7 +29,7 @@ export function drawBag(piece: FoldedPiece, context: DrawContext): readonly Blan
         ...(form.bottom > 0 ? [score('bottom', segment(0, floor, total, floor), 90)] : []),
         ...(form.top > 0 ? [score('turned-in top', segment(0, rim, total, rim), 180)] : []),
       ],
-      areas: [
+      areas: () => [
         ...corners.map((x, index) =>
           area('panel', names[index] ?? 'panel', rectangle(x, floor, corners[index + 1] ?? total, rim)),
         ),
@@ -42,7 +42,7 @@ export function drawBag(piece: FoldedPiece, context: DrawContext): readonly Blan
         ...(form.bottom > 0 ? [area('flap', 'bottom', rectangle(0, 0, total, floor))] : []),
         ...(form.top > 0 ? [area('flap', 'turned-in top', rectangle(0, rim, total, high))] : []),
       ],
-      measures: [
+      measures: () => [
         measure('blank length', point(0, high), point(total, high)),
         measure('blank height', point(0, 0), point(0, high)),
         measure('seam', point(0, 0), point(form.seam, 0)),

@@ -18,11 +18,11 @@ export function drawBand(piece: FoldedPiece, given: BandGiven, context: DrawCont
       stock: given.stock,
       outline: rectangle(0, 0, long, wide),
       scores: scores.map((x, index) => score(`score ${String(index + 1)}`, segment(x, 0, x, wide), 90)),
-      areas: [
+      areas: () => [
         area('panel', 'band', rectangle(0, 0, long, wide)),
         ...(lap > 0 ? [area('glue', 'lap', rectangle(long - lap, 0, long, wide))] : []),
       ],
-      measures: [
+      measures: () => [
         measure('length', point(0, wide), point(long, wide)),
         measure('width', point(0, 0), point(0, wide)),
         ...scores.map((x, index) => measure(`score ${String(index + 1)}`, point(0, 0), point(x, 0))),

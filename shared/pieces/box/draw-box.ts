@@ -6,7 +6,7 @@ import { drawLayer } from '../card/draw-card.ts'
 import type { BoxForm, FoldedPiece } from '../folded-piece.ts'
 import { drawFlatSheet, flatRectangle } from '../insert/draw-insert.ts'
 import type { BoxGiven } from './box-given.ts'
-import { trayOutline, trayTabs, type TrayShape } from './box-outline.ts'
+import { trayOutline, trayTabs, type TrayShape, type TrayTab } from './box-outline.ts'
 
 /** Covering paper turned over the rim, and how far a wall's lining stays below it (common practice). */
 const turnIn: Millimetres = 15
@@ -27,18 +27,18 @@ const scoreLines = ({ length, width, walls }: TrayShape): Lines => ({
 })
 
 /** Scores along the floor's four sides, then along the tabs. */
-function trayScores(shape: TrayShape): readonly Score[] {
+function trayScores(shape: TrayShape, tabs: readonly TrayTab[]): readonly Score[] {
   const { left, right, bottom, top } = scoreLines(shape)
   return [
     score('end wall 1', segment(left, bottom, left, top), 90),
     score('end wall 2', segment(right, bottom, right, top), 90),
     score('side wall 1', segment(left, bottom, right, bottom), 90),
     score('side wall 2', segment(left, top, right, top), 90),
-    ...trayTabs(shape).map((tab, index) => score(`tab ${String(index + 1)}`, tab.score, 90)),
+    ...tabs.map((tab, index) => score(`tab ${String(index + 1)}`, tab.score, 90)),
   ]
 }
 
-function trayAreas(shape: TrayShape, floor: string): readonly BlankArea[] {
+function trayAreas(shape: TrayShape, tabs: readonly TrayTab[], floor: string): readonly BlankArea[] {
   const { left, right, bottom, top } = scoreLines(shape)
   return [
     area('panel', floor, rectangle(left, bottom, right, top)),
@@ -46,7 +46,7 @@ function trayAreas(shape: TrayShape, floor: string): readonly BlankArea[] {
     area('wall', 'end wall', rectangle(right, bottom, shape.length, top)),
     area('wall', 'side wall', rectangle(left, 0, right, bottom)),
     area('wall', 'side wall', rectangle(left, top, right, shape.width)),
-    ...trayTabs(shape).flatMap((tab) => [area('tab', 'tab', tab.polygon), area('glue', 'tab', tab.polygon)]),
+    ...tabs.flatMap((tab) => [area('tab', 'tab', tab.polygon), area('glue', 'tab', tab.polygon)]),
   ]
 }
 
@@ -120,8 +120,8 @@ function drawCover(context: DrawContext, given: BoxGiven, piece: FoldedPiece, fo
         score('turned over the rim', segment(turnIn, y1, turnIn, y2), 180),
         score('turned over the rim', segment(right - turnIn, y1, right - turnIn, y2), 180),
       ],
-      areas: [area('panel', 'cover', rectangle(x1, y1, x2, y2))],
-      measures: [
+      areas: () => [area('panel', 'cover', rectangle(x1, y1, x2, y2))],
+      measures: () => [
         measure('length', point(0, top), point(right, top)),
         measure('width', point(0, 0), point(0, top)),
         measure('wall and turn-in', point(x1, 0), point(x1, y1)),
@@ -143,15 +143,16 @@ export function drawBox(piece: FoldedPiece, given: BoxGiven, context: DrawContex
   const { form } = piece
   if (form.kind !== 'box') return []
   const shape = trayShape(given, piece, form)
+  const tabs = trayTabs(shape)
   return [
     makeBlank({
       name: context.name,
       stock: given.stock,
       outline: trayOutline(shape),
-      cuts: trayTabs(shape).flatMap((tab) => (tab.slit === null ? [] : [tab.slit])),
-      scores: trayScores(shape),
-      areas: trayAreas(shape, given.kind === 'lid' ? 'top' : 'floor'),
-      measures: trayMeasures(shape),
+      cuts: tabs.flatMap((tab) => (tab.slit === null ? [] : [tab.slit])),
+      scores: trayScores(shape, tabs),
+      areas: () => trayAreas(shape, tabs, given.kind === 'lid' ? 'top' : 'floor'),
+      measures: () => trayMeasures(shape),
       grain: grainAlong(context, given.stock, 'x'),
     }),
     ...drawLinings(context, given, piece),

@@ -75,8 +75,8 @@ export function drawLayer(
     name: `${context.name}/${part}`,
     stock: layer.stock,
     outline,
-    areas: [area('panel', part, outline)],
-    measures: [
+    areas: () => [area('panel', part, outline)],
+    measures: () => [
       measure('width', point(0, 0), point(width, 0)),
       measure('length', point(0, 0), point(0, length)),
       ...(layer.banner === null
@@ -113,23 +113,24 @@ function drawInsertSheet(
   across: Millimetres,
   high: Millimetres,
 ): readonly Blank[] {
-  if (given.insert === null) return []
+  const { insert } = given
+  if (insert === null) return []
   const tall = high - 2 * insertInset
   const panel = across - 2 * insertInset
-  const wide = given.insert.folded ? 2 * panel : panel
+  const wide = insert.folded ? 2 * panel : panel
   return [
     makeBlank({
       name: `${context.name}/insert`,
-      stock: given.insert.stock,
+      stock: insert.stock,
       outline: rectangle(0, 0, wide, tall),
-      scores: given.insert.folded ? [score('fold', segment(panel, 0, panel, tall), 180)] : [],
-      areas: [area('panel', 'insert', rectangle(0, 0, wide, tall))],
-      measures: [
+      scores: insert.folded ? [score('fold', segment(panel, 0, panel, tall), 180)] : [],
+      areas: () => [area('panel', 'insert', rectangle(0, 0, wide, tall))],
+      measures: () => [
         measure('width', point(0, 0), point(wide, 0)),
         measure('length', point(0, 0), point(0, tall)),
-        ...(given.insert.folded ? [measure('fold', point(0, tall), point(panel, tall))] : []),
+        ...(insert.folded ? [measure('fold', point(0, tall), point(panel, tall))] : []),
       ],
-      grain: grainAlong(context, given.insert.stock, 'y'),
+      grain: grainAlong(context, insert.stock, 'y'),
     }),
   ]
 }
@@ -167,7 +168,7 @@ export function drawCard(piece: FoldedPiece, given: CardGiven, context: DrawCont
         ...foldScores(given, panels, high, bottom),
         ...(pocket === null ? [] : [score('pocket', segment(holder.from, bottom, holder.to, bottom), 180)]),
       ],
-      areas: [
+      areas: () => [
         ...panels.map((panel) => area('panel', panel.name, rectangle(panel.from, bottom, panel.to, bottom + high))),
         ...insideLayers(given, holder, high, bottom, lengthRuns),
         ...(pocket === null ? [] : [area('flap', 'pocket', pocket)]),
@@ -178,7 +179,7 @@ export function drawCard(piece: FoldedPiece, given: CardGiven, context: DrawCont
               area('glue', 'pocket side', rectangle(holder.to - side, 0, holder.to, bottom)),
             ]),
       ],
-      measures: [
+      measures: () => [
         measure(
           size.across === null ? 'width' : 'blank across the fold',
           point(0, bottom + high),

@@ -13,8 +13,8 @@ export function drawCustom(given: CustomGiven, context: DrawContext): readonly B
       stock: given.stock,
       outline: given.outline,
       scores: given.scores.map((line, index) => ({ ...line, name: `score ${String(index + 1)}` })),
-      areas: [area('panel', context.name, given.outline)],
-      measures: [
+      areas: () => [area('panel', context.name, given.outline)],
+      measures: () => [
         measure('overall across', point(left, bottom), point(right, bottom)),
         measure('overall up', point(left, bottom), point(left, top)),
       ],

@@ -79,13 +79,13 @@ export function drawBaronial(
       stock: given.stock,
       outline,
       scores: flaps.map((flap) => score(foldNames[flap.name], foldWithin(shape, flap), 180)),
-      areas: [
+      areas: () => [
         area('panel', 'face', baronialPocket(shape)),
         ...flaps.map((flap) => area('flap', flapNames[flap.name], flap.flat)),
         ...flaps.slice(0, 2).flatMap((side) => gluedStrip(bottom, side)),
         ...sealStrips(shape, seal),
       ],
-      measures: [
+      measures: () => [
         measure('square', tip, east),
         measure('left corner', west, onEdge(west, tip, shape.corners.left)),
         measure('right corner', east, onEdge(east, tip, shape.corners.right)),

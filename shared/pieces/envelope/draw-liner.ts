@@ -57,8 +57,8 @@ export function drawLiner(
       stock: given.liner,
       outline,
       scores: onFold.length < 2 ? [] : [score('flap fold', segment(ends.left, top, ends.right, top), 180)],
-      areas: [area('panel', 'liner', outline)],
-      measures: [
+      areas: () => [area('panel', 'liner', outline)],
+      measures: () => [
         measure('width', point(x1, floor), point(x2, floor)),
         measure('height', point(middle, floor), point(middle, peak)),
         measure('flap fold', point(x1, floor), point(x1, top)),

@@ -29,10 +29,11 @@ export function drawSquareFlap(given: EnvelopeGiven, form: SquareFlapForm, conte
   const backPart = parts.find((part) => part.name === 'back')
   const sealPart = parts.find((part) => part.name === 'flap')
   if (backPart === undefined || sealPart === undefined) return []
-  const sideGlue = parts.slice(0, 2).flatMap((side) => {
-    const shared = clipToConvex(side.folded, backPart.folded)
-    return shared.length < 3 ? [] : [area('glue', 'side flap', movePolygon(shared, reflection(side.fold)))]
-  })
+  const sideGlue = () =>
+    parts.slice(0, 2).flatMap((side) => {
+      const shared = clipToConvex(side.folded, backPart.folded)
+      return shared.length < 3 ? [] : [area('glue', 'side flap', movePolygon(shared, reflection(side.fold)))]
+    })
   const lengthRuns = form.throatAlong === 'length' ? 'x' : 'y'
   const top = across + flap
   const left = -sideFlap
@@ -42,12 +43,12 @@ export function drawSquareFlap(given: EnvelopeGiven, form: SquareFlapForm, conte
       stock: given.stock,
       outline: roundCorners(squareFlapOutline(sizes), given.corner, (corner) => Math.abs(corner.y - top) < 1e-9),
       scores: parts.map((part) => score(foldNames[part.name], part.fold, 180)),
-      areas: [
+      areas: () => [
         area('panel', 'face', squareFlapFace(sizes)),
         ...parts.map((part) => area('flap', partNames[part.name], part.flat)),
-        ...sideGlue,
+        ...sideGlue(),
       ],
-      measures: [
+      measures: () => [
         measure('blank along the throat', point(left, top), point(along + sideFlap, top)),
         measure('blank across the throat', point(left, -back), point(left, top)),
         measure('side flap', point(left, -back), point(0, -back)),

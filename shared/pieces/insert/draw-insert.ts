@@ -17,8 +17,8 @@ export function drawFlatSheet(
     name: sheet.name,
     stock: sheet.stock,
     outline: sheet.outline,
-    areas: [area('panel', sheet.part, sheet.outline)],
-    measures: [
+    areas: () => [area('panel', sheet.part, sheet.outline)],
+    measures: () => [
       measure('length', point(left, bottom), point(right, bottom)),
       measure('width', point(left, bottom), point(left, top)),
     ],

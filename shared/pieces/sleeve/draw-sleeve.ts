@@ -20,14 +20,14 @@ export function drawSleeve(piece: FoldedPiece, context: DrawContext): readonly B
       stock: given.stock,
       outline,
       scores: ends.map((x, index) => score(`score ${String(index + 1)}`, segment(x, 0, x, high), 90)),
-      areas: [
+      areas: () => [
         ...ends.map((x, index) =>
           area('panel', panelNames[index] ?? 'panel', rectangle(x - (form.panels[index] ?? 0), 0, x, high)),
         ),
         area('tab', 'lap', rectangle(lap, 0, total, high)),
         area('glue', 'lap', rectangle(lap, 0, total, high)),
       ],
-      measures: [
+      measures: () => [
         measure('blank length', point(0, high), point(total, high)),
         measure('width along the tube', point(0, 0), point(0, high)),
         ...ends.map((x, index) => measure(`score ${String(index + 1)}`, point(0, 0), point(x, 0))),

@@ -7,9 +7,15 @@ import { cutRectangles, type CutRectangle } from '../sheet-of.ts'
 const order = (placement: Placement): number => (placement === null ? 0 : placement === 'at an angle' ? 1 : 2)
 
 function judgePiece(judged: JudgedSet, name: string, cuts: readonly CutRectangle[]): readonly Finding[] {
-  const worst = cuts
-    .map((cut) => ({ ...cut, placement: placementIn(cut.rectangle, cut.sheet) }))
-    .toSorted((a, b) => order(a.placement) - order(b.placement) || b.rectangle.length - a.rectangle.length)[0]
+  const placed = cuts.map(({ blank, rectangle, sheet }) => ({
+    blank,
+    rectangle,
+    sheet,
+    placement: placementIn(rectangle, sheet),
+  }))
+  if (placed.length > 1)
+    placed.sort((a, b) => order(a.placement) - order(b.placement) || b.rectangle.length - a.rectangle.length)
+  const [worst] = placed
   if (worst === undefined) return []
   const { blank, rectangle, sheet, placement } = worst
   const size = sizeInSetUnits(judged, [rectangle.length, rectangle.width])
