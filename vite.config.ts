@@ -43,12 +43,14 @@ const startingChunks = (['start', 'check'] as const).map((chunk, index) => ({
   name: (id: string, bundle: ChunkingContext): string | null => (closures[chunk](id, bundle) ? chunk : null),
 }))
 
-// One configuration for both bundles: `vite build --ssr` makes the command line, plain `vite build` the dashboard.
+// One configuration for every bundle: `vite build --ssr` makes the command line, `--mode server` with it the server,
+// plain `vite build` the dashboard.
 /** The bench is measured as users run it: bundled. */
-const inputs = (mode: string): { readonly folder: string; readonly input: Readonly<Record<string, string>> } =>
-  mode === 'bench'
-    ? { folder: 'dist/bench', input: { bench: 'tests/bench/bench.ts' } }
-    : { folder: 'dist/cli', input: { foldgauge: 'cli/main.ts' } }
+const inputs = (mode: string): { readonly folder: string; readonly input: Readonly<Record<string, string>> } => {
+  if (mode === 'bench') return { folder: 'dist/bench', input: { bench: 'tests/bench/bench.ts' } }
+  if (mode === 'server') return { folder: 'dist/server', input: { main: 'server/main.ts' } }
+  return { folder: 'dist/cli', input: { foldgauge: 'cli/main.ts' } }
+}
 
 export default defineConfig(({ isSsrBuild, mode }) =>
   isSsrBuild === true
@@ -61,18 +63,19 @@ export default defineConfig(({ isSsrBuild, mode }) =>
           target: 'node20',
           outDir: inputs(mode).folder,
           emptyOutDir: true,
-          minify: true,
+          // Entities are known by their names.
+          minify: mode !== 'server',
           rolldownOptions: {
             input: inputs(mode).input,
             output: {
               entryFileNames: '[name].js',
               chunkFileNames: 'chunks/[name]-[hash].js',
-              codeSplitting: { groups: startingChunks },
+              ...(mode === 'server' ? {} : { codeSplitting: { groups: startingChunks } }),
             },
           },
         },
         // Packed alone, the command line must find everything in its own bundle.
-        ssr: mode === 'bench' ? {} : { noExternal: true },
+        ssr: mode === 'bench' || mode === 'server' ? {} : { noExternal: true },
       }
     : {
         plugins: [react(), tailwindcss()],

@@ -73,8 +73,13 @@ async function start(config: Config, parts: ReadonlySet<string>): Promise<void> 
     mailer?.close()
     objects.close()
     await database.destroy()
+    // The channel to whoever started this process would keep it running.
+    if (process.connected) process.disconnect()
   }
   for (const signal of ['SIGINT', 'SIGTERM'] as const) process.once(signal, () => void stop())
+  // Started by another program that is gone now.
+  process.once('disconnect', () => void stop())
+  process.send?.('ready')
 }
 
 const words = new Set(process.argv.slice(2))

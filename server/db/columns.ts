@@ -21,14 +21,14 @@ export const Day = of('date')
 /** To the millisecond, so that a moment survives a round trip through JSON and can lead a page. */
 export const Moment = of('timestamp with time zone', { precision: 3 })
 
-/** A column that points at another table's row; named by entity so that files do not import one another in circles. */
+/** A column that points at another table's row; named by its table so that files do not import one another in circles. */
 export const Ref =
   (
-    entity: string,
+    table: string,
     onDelete: 'CASCADE' | 'SET NULL' | 'RESTRICT' = 'CASCADE',
     options: ColumnOptions = {},
   ): PropertyDecorator =>
   (target, property) => {
     Uuid(options)(target, property)
-    ForeignKey(entity, { onDelete })(target, property)
+    ForeignKey(table, { onDelete })(target, property)
   }

@@ -81,11 +81,11 @@ async function warnOfWaivers(context: WorkContext): Promise<void> {
   const inAWeek = new Date(context.now().getTime() + week * 86_400_000).toISOString().slice(0, 10)
   const rows: { teamId: string; slug: string; name: string; title: string; number: number; fingerprint: string }[] =
     await database.manager.query(
-      `select s.team_id as "teamId", team.slug, s.name, s.title, v.number, verdict ->> 'fingerprint' as fingerprint
+      `select s.team_id as "teamId", team.slug, s.name, s.title, v.number, judged.item ->> 'fingerprint' as fingerprint
        from template_set s join team on team.id = s.team_id join version v on v.id = s.shown_version_id
        join version_content c on c.version_id = v.id
-       cross join lateral jsonb_array_elements(c.report -> 'verdicts') verdict
-       where (v.counts ->> 'waived')::int > 0 and verdict -> 'waiver' ->> 'until' = $1`,
+       cross join lateral jsonb_array_elements(c.report -> 'verdicts') as judged(item)
+       where (v.counts ->> 'waived')::int > 0 and judged.item -> 'waiver' ->> 'until' = $1`,
       [inAWeek],
     )
   for (const row of rows)

@@ -6,7 +6,7 @@ import { Bytes, Id, Moment, Ref, Text, Uuid } from '../../db/columns.ts'
 export class AccountLink {
   @Id() id!: string
   @Index('account_link_person')
-  @Ref('Person')
+  @Ref('person')
   personId!: string
   @Text() purpose!: 'reset' | 'email-old' | 'email-new'
   @Index('account_link_secret', { unique: true })

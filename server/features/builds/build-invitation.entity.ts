@@ -6,8 +6,8 @@ import { Bytes, Day, Id, Moment, Ref, Text, Uuid, Whole } from '../../db/columns
 @Index('build_invitation_stamp', ['versionId', 'tester'], { unique: true })
 export class BuildInvitation {
   @Id() id!: string
-  @Ref('Team') teamId!: string
-  @Ref('Version') versionId!: string
+  @Ref('team') teamId!: string
+  @Ref('version') versionId!: string
   /** Counts testers of a version: the 2 of `v3-t2`. */
   @Whole() tester!: number
   @Index('build_invitation_email')

@@ -5,9 +5,9 @@ import { Flag, Id, Moment, Ref, Text, Whole } from '../../db/columns.ts'
 @Entity({ name: 'build_photo' })
 export class BuildPhoto {
   @Id() id!: string
-  @Ref('Team') teamId!: string
+  @Ref('team') teamId!: string
   @Index('build_photo_build')
-  @Ref('Build')
+  @Ref('build')
   buildId!: string
   @Text() key!: string
   @Text() alt!: string

@@ -7,10 +7,10 @@ import { Id, Json, Moment, Ref, Text } from '../../db/columns.ts'
 @Index('build_version', ['versionId', 'startedAt', 'id'])
 export class Build {
   @Id() id!: string
-  @Ref('Team') teamId!: string
-  @Ref('Version') versionId!: string
+  @Ref('team') teamId!: string
+  @Ref('version') versionId!: string
   @Index('build_invitation_build', { unique: true })
-  @Ref('BuildInvitation', 'SET NULL', { nullable: true })
+  @Ref('build_invitation', 'SET NULL', { nullable: true })
   invitationId!: string | null
   @Text() stamp!: string
   @Text() tester!: string

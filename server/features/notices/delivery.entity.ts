@@ -6,7 +6,7 @@ import { Id, Json, Moment, Ref, Text, Whole } from '../../db/columns.ts'
 @Index('delivery_list', ['webhookId', 'createdAt', 'id'])
 export class Delivery {
   @Id() id!: string
-  @Ref('Webhook') webhookId!: string
+  @Ref('webhook') webhookId!: string
   @Text() event!: string
   @Json() payload!: object
   @Whole({ default: 0 }) attempts!: number

@@ -5,10 +5,10 @@ import { Text } from '../../db/columns.ts'
 /** How a person wants to be told of one kind of event; absent is the usual. */
 @Entity({ name: 'notice_choice' })
 export class NoticeChoice {
-  @ForeignKey('Team', { onDelete: 'CASCADE' })
+  @ForeignKey('team', { onDelete: 'CASCADE' })
   @PrimaryColumn({ type: 'uuid' })
   teamId!: string
-  @ForeignKey('Person', { onDelete: 'CASCADE' })
+  @ForeignKey('person', { onDelete: 'CASCADE' })
   @PrimaryColumn({ type: 'uuid' })
   personId!: string
   @PrimaryColumn({ type: 'text' }) event!: NoticeEvent

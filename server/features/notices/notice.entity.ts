@@ -8,8 +8,8 @@ import { Flag, Id, Moment, Ref, Text } from '../../db/columns.ts'
 @Index('notice_digest', { synchronize: false })
 export class Notice {
   @Id() id!: string
-  @Ref('Team') teamId!: string
-  @Ref('Person') personId!: string
+  @Ref('team') teamId!: string
+  @Ref('person') personId!: string
   @Text() event!: NoticeEvent
   @Text() subject!: string
   @Text() sentence!: string

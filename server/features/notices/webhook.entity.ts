@@ -7,7 +7,7 @@ import { Flag, Id, Moment, Ref, Text, Texts, Whole } from '../../db/columns.ts'
 export class Webhook {
   @Id() id!: string
   @Index('webhook_team')
-  @Ref('Team')
+  @Ref('team')
   teamId!: string
   @Text() url!: string
   @Texts() events!: NoticeEvent[]

@@ -4,7 +4,7 @@ import { Moment, Real, Text, Whole } from '../../db/columns.ts'
 /** An editor's tick or query beside one measure of a version. */
 @Entity({ name: 'number_tick' })
 export class NumberTick {
-  @ForeignKey('Version', { onDelete: 'CASCADE' })
+  @ForeignKey('version', { onDelete: 'CASCADE' })
   @PrimaryColumn({ type: 'uuid' })
   versionId!: string
   @PrimaryColumn({ type: 'text' }) key!: string

@@ -6,7 +6,7 @@ import { Flag, Id, Moment, Ref, Text, Texts } from '../../db/columns.ts'
 @Index('erratum_set', ['setId', 'createdAt'])
 export class Erratum {
   @Id() id!: string
-  @Ref('TemplateSet') setId!: string
+  @Ref('template_set') setId!: string
   @Texts() labels!: string[]
   @Texts() pieces!: string[]
   @Texts() pages!: string[]

@@ -8,8 +8,8 @@ import { Id, Moment, Ref, Text, Whole } from '../../db/columns.ts'
 @Index('publication_list', ['setId', 'publishedAt'])
 export class Publication {
   @Id() id!: string
-  @Ref('TemplateSet') setId!: string
-  @Ref('Version') versionId!: string
+  @Ref('template_set') setId!: string
+  @Ref('version') versionId!: string
   @Whole() number!: number
   @Text() label!: string
   @Text() notes!: string

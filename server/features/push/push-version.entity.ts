@@ -5,10 +5,10 @@ import { Flag, Text } from '../../db/columns.ts'
 @Entity({ name: 'push_version' })
 @Index('push_version_version', ['versionId'])
 export class PushVersion {
-  @ForeignKey('Push', { onDelete: 'CASCADE' })
+  @ForeignKey('push', { onDelete: 'CASCADE' })
   @PrimaryColumn({ type: 'uuid' })
   pushId!: string
-  @ForeignKey('Version', { onDelete: 'CASCADE' })
+  @ForeignKey('version', { onDelete: 'CASCADE' })
   @PrimaryColumn({ type: 'uuid' })
   versionId!: string
   @Flag() isNew!: boolean

@@ -9,7 +9,7 @@ import type { ActorKind } from '../../http/caller.ts'
 @Index('push_list', ['teamId', 'createdAt', 'id'])
 export class Push {
   @Id() id!: string
-  @Ref('Team') teamId!: string
+  @Ref('team') teamId!: string
   @Text() contentKey!: string
   @Text() branch!: string
   @Text({ nullable: true }) commit!: string | null

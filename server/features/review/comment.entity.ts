@@ -6,8 +6,8 @@ import { Id, Moment, Ref, Text, Uuid, Whole } from '../../db/columns.ts'
 @Index('comment_version', ['versionId', 'createdAt'])
 export class Comment {
   @Id() id!: string
-  @Ref('Team') teamId!: string
-  @Ref('Version') versionId!: string
+  @Ref('team') teamId!: string
+  @Ref('version') versionId!: string
   @Whole() number!: number
   @Text() anchorKind!: 'version' | 'fit' | 'piece'
   @Text({ nullable: true }) anchorName!: string | null

@@ -7,8 +7,8 @@ import { Flag, Id, Moment, Ref, Text, Uuid, Whole } from '../../db/columns.ts'
 @Index('decision_version', ['versionId'])
 export class Decision {
   @Id() id!: string
-  @Ref('TemplateSet') setId!: string
-  @Ref('Version') versionId!: string
+  @Ref('template_set') setId!: string
+  @Ref('version') versionId!: string
   @Whole() number!: number
   @Text() content!: string
   @Text() decision!: 'approve' | 'ask-changes'

@@ -7,8 +7,8 @@ import { Day, Id, Moment, Ref, Text } from '../../db/columns.ts'
 @Index('known_failure_until', ['until'])
 export class KnownFailure {
   @Id() id!: string
-  @Ref('Team') teamId!: string
-  @Ref('TemplateSet') setId!: string
+  @Ref('team') teamId!: string
+  @Ref('template_set') setId!: string
   @Text() fingerprint!: string
   @Text() reason!: string
   /** Holds through this day. */

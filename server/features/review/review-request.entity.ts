@@ -6,7 +6,7 @@ import { Id, Moment, Ref, Text, Uuid } from '../../db/columns.ts'
 @Index('review_request_version', ['versionId', 'createdAt'])
 export class ReviewRequest {
   @Id() id!: string
-  @Ref('Version') versionId!: string
+  @Ref('version') versionId!: string
   @Text() note!: string
   @Uuid({ nullable: true }) personId!: string | null
   @Text() askedBy!: string

@@ -6,11 +6,11 @@ import type { Quantity } from '../../../shared/report/report.ts'
 @Entity({ name: 'library_piece' })
 @Index('library_piece_inside', ['teamId', 'longer', 'shorter'])
 export class LibraryPiece {
-  @ForeignKey('TemplateSet', { onDelete: 'CASCADE' })
+  @ForeignKey('template_set', { onDelete: 'CASCADE' })
   @PrimaryColumn({ type: 'uuid' })
   setId!: string
   @PrimaryColumn({ type: 'text' }) piece!: string
-  @Ref('Team') teamId!: string
+  @Ref('team') teamId!: string
   @Whole() number!: number
   @Text() kind!: string
   /** The two sides of the opening in millimetres, worst case wide. */

@@ -7,7 +7,7 @@ import { Flag, Id, Moment, Ref, Text, Texts, Uuid, Whole } from '../../db/column
 @Index('template_set_list', { synchronize: false })
 export class TemplateSet {
   @Id() id!: string
-  @Ref('Team') teamId!: string
+  @Ref('team') teamId!: string
   @Text() name!: string
   @Text() title!: string
   @Text({ nullable: true }) family!: string | null

@@ -7,7 +7,7 @@ import { Bytes, Id, Moment, Ref, Text } from '../../db/columns.ts'
 @Index('invitation_team', ['teamId', 'createdAt'])
 export class Invitation {
   @Id() id!: string
-  @Ref('Team') teamId!: string
+  @Ref('team') teamId!: string
   @Text() email!: string
   @Text() role!: Role
   @Index('invitation_secret', { unique: true })

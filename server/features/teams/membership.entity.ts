@@ -5,11 +5,11 @@ import { Moment, Text } from '../../db/columns.ts'
 /** A person's place in a team. */
 @Entity({ name: 'membership' })
 export class Membership {
-  @ForeignKey('Team', { onDelete: 'CASCADE' })
+  @ForeignKey('team', { onDelete: 'CASCADE' })
   @PrimaryColumn({ type: 'uuid' })
   teamId!: string
   @Index('membership_person')
-  @ForeignKey('Person', { onDelete: 'CASCADE' })
+  @ForeignKey('person', { onDelete: 'CASCADE' })
   @PrimaryColumn({ type: 'uuid' })
   personId!: string
   @Text() role!: Role

@@ -7,7 +7,7 @@ import { Bytes, Id, Moment, Ref, Text, Texts } from '../../db/columns.ts'
 @Index('api_token_team', ['teamId', 'createdAt'])
 export class ApiToken {
   @Id() id!: string
-  @Ref('Team') teamId!: string
+  @Ref('team') teamId!: string
   @Text() name!: string
   @Index('api_token_prefix', { unique: true })
   @Text()
@@ -15,7 +15,7 @@ export class ApiToken {
   @Bytes() secretHash!: Buffer
   @Text() lastFour!: string
   @Texts() scopes!: TokenScope[]
-  @Ref('Person', 'SET NULL', { nullable: true }) createdBy!: string | null
+  @Ref('person', 'SET NULL', { nullable: true }) createdBy!: string | null
   @Text() creatorName!: string
   @Moment({ default: () => 'now()' }) createdAt!: Date
   @Moment() expiresAt!: Date

@@ -6,7 +6,7 @@ import { Id, Moment, Reals, Ref, Text } from '../../db/columns.ts'
 @Index('paper_reading_list', ['teamId', 'createdAt', 'id'])
 export class PaperReading {
   @Id() id!: string
-  @Ref('Team') teamId!: string
+  @Ref('team') teamId!: string
   @Text() stock!: string
   @Text() method!: 'single-sheet' | 'stack-of-ten'
   @Reals() readings!: number[]

@@ -5,12 +5,12 @@ import { Moment, Ref, Text, Texts } from '../../db/columns.ts'
 @Entity({ name: 'branch_state' })
 @Index('branch_state_team', ['teamId', 'branch'])
 export class BranchState {
-  @ForeignKey('TemplateSet', { onDelete: 'CASCADE' })
+  @ForeignKey('template_set', { onDelete: 'CASCADE' })
   @PrimaryColumn({ type: 'uuid' })
   setId!: string
   @PrimaryColumn({ type: 'text' }) branch!: string
-  @Ref('Team') teamId!: string
-  @Ref('Version') versionId!: string
+  @Ref('team') teamId!: string
+  @Ref('version') versionId!: string
   /** Failures people have been told of; a notice leaves only for others. */
   @Texts({ default: () => "'{}'" }) toldFailing!: string[]
   /** The workspace it was last judged with, whether or not that changed anything. */

@@ -7,7 +7,7 @@ import { Id, Json, Moment, Real, Ref, Text } from '../../db/columns.ts'
 @Index('recheck_engine', ['versionId', 'engine', 'rules'], { unique: true })
 export class Recheck {
   @Id() id!: string
-  @Ref('Version') versionId!: string
+  @Ref('version') versionId!: string
   @Text() engine!: string
   @Text() rules!: string
   @Text() verdict!: Report['summary']['verdict']

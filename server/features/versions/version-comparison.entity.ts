@@ -6,10 +6,10 @@ import { Flag, Json, Moment, Text } from '../../db/columns.ts'
 @Entity({ name: 'version_comparison' })
 @Index('version_comparison_after', ['afterId'])
 export class VersionComparison {
-  @ForeignKey('Version', { onDelete: 'CASCADE' })
+  @ForeignKey('version', { onDelete: 'CASCADE' })
   @PrimaryColumn({ type: 'uuid' })
   beforeId!: string
-  @ForeignKey('Version', { onDelete: 'CASCADE' })
+  @ForeignKey('version', { onDelete: 'CASCADE' })
   @PrimaryColumn({ type: 'uuid' })
   afterId!: string
   /** Engine and rules edition that compared. */

@@ -7,10 +7,10 @@ import { Json, Real, Ref, Text } from '../../db/columns.ts'
 @Index('version_content_workspace', ['teamId', 'workspaceDigest'])
 @Index('version_content_text', ['teamId', 'textDigest'])
 export class VersionContent {
-  @ForeignKey('Version', { onDelete: 'CASCADE' })
+  @ForeignKey('version', { onDelete: 'CASCADE' })
   @PrimaryColumn({ type: 'uuid' })
   versionId!: string
-  @Ref('Team') teamId!: string
+  @Ref('team') teamId!: string
   @Text() textDigest!: string
   @Text({ nullable: true }) workspaceFile!: string | null
   @Text({ nullable: true }) workspaceDigest!: string | null

@@ -19,8 +19,8 @@ export type ReviewState = (typeof reviewStates)[number]
 @Index('version_team_age', ['teamId', 'createdAt'])
 export class Version {
   @Id() id!: string
-  @Ref('Team') teamId!: string
-  @Ref('TemplateSet') setId!: string
+  @Ref('team') teamId!: string
+  @Ref('template_set') setId!: string
   @Whole() number!: number
   @Text() branch!: string
   @Text({ nullable: true }) commit!: string | null
@@ -52,7 +52,7 @@ export class Version {
   @Text() actorName!: string
   @Uuid({ nullable: true }) personId!: string | null
   @Index('version_baseline')
-  @Ref('Version', 'SET NULL', { nullable: true })
+  @Ref('version', 'SET NULL', { nullable: true })
   baselineId!: string | null
   @Whole({ nullable: true }) baselineNumber!: number | null
   @Text() baselineReason!: BaselineReason
