@@ -22,6 +22,9 @@ const git = (
 
 /** A set as it was at a git revision, judged with the workspace as it was then. */
 function fromRevision(io: Io, word: string, revision: string, path: string, judging: Judging): readonly Report[] {
+  // No revision begins with a hyphen; git would take the word for an option, and some of its options write files.
+  if (revision.startsWith('-'))
+    throw new UsageError(`${revision} is no git revision`, 'Write one such as main:sets/notes.yaml.')
   const top = git(io.cwd, ['rev-parse', '--show-toplevel'])
   if (!top.ok) throw new UsageError(`${word} names a git revision, but this folder is in no git repository`)
   const root = top.text.trim()

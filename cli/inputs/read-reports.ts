@@ -1,17 +1,25 @@
 import type { Report } from '../../shared/report/report.ts'
 import { UsageError } from '../io.ts'
 
+const isMap = (value: unknown): boolean => typeof value === 'object' && value !== null && !Array.isArray(value)
+
+const isListOfMaps = (value: unknown): boolean => Array.isArray(value) && value.every(isMap)
+
 const looksLikeReport = (value: unknown): value is Report =>
   typeof value === 'object' &&
   value !== null &&
   'format' in value &&
   'set' in value &&
+  typeof value.set === 'string' &&
   'verdicts' in value &&
-  Array.isArray(value.verdicts) &&
+  isListOfMaps(value.verdicts) &&
   'fits' in value &&
-  Array.isArray(value.fits) &&
+  isListOfMaps(value.fits) &&
   'pieces' in value &&
-  'summary' in value
+  isMap(value.pieces) &&
+  Object.values(value.pieces as Readonly<Record<string, unknown>>).every(isMap) &&
+  'summary' in value &&
+  isMap(value.summary)
 
 /** Reports from a file that `check --report json` wrote: one object or an array. @throws UsageError */
 export function readReports(text: string, shown: string): readonly Report[] {
