@@ -8,6 +8,7 @@ export interface RunningPostgres {
 export function startPostgres(options?: {
   readonly folder?: string
   readonly isLasting?: boolean
+  readonly port?: number
 }): Promise<RunningPostgres>
 export function stopPostgres(folder?: string): Promise<void>
 export function removePostgres(folder?: string): void

@@ -128,17 +128,18 @@ function makeDatabase(programs, port) {
 /**
  * Starts PostgreSQL and waits until it answers.
  * @param options.folder where it keeps its files
+ * @param options.port a port to keep; else a free one
  * @param options.isLasting false gives up safety of the disk for speed: tests
  * @returns its url, port, process id, and `stop`
  */
-export async function startPostgres({ folder = usualFolder, isLasting = true } = {}) {
+export async function startPostgres({ folder = usualFolder, isLasting = true, port: wanted } = {}) {
   const programs = postgresPrograms()
   const already = runningPostgres(folder)
   if (already !== null) return { ...already, folder, stop: () => stopPostgres(folder) }
   const mode = chooseMode(folder)
   if (!existsSync(join(folder, 'cluster', 'PG_VERSION'))) initialise(folder, mode, programs)
   for (let attempt = 1; ; attempt += 1) {
-    const port = await freePort()
+    const port = wanted ?? (await freePort())
     const settings = {
       listen_addresses: '127.0.0.1',
       port: String(port),

@@ -26,7 +26,10 @@ export type NoticeEvent = (typeof noticeEvents)[number]
 export const noticeModes = ['now', 'digest', 'off'] as const
 export type NoticeMode = (typeof noticeModes)[number]
 
-const choicesShape = z.record(z.enum(noticeEvents), z.enum(noticeModes)).meta({ id: 'NoticeChoices' })
+const mode = z.enum(noticeModes)
+const choicesShape = z
+  .strictObject(Object.fromEntries(noticeEvents.map((event) => [event, mode])) as Record<NoticeEvent, typeof mode>)
+  .meta({ id: 'NoticeChoices' })
 
 const noticeShape = z
   .strictObject({

@@ -60,6 +60,26 @@ function operationOf(endpoint: Endpoint): ZodOpenApiOperationObject {
   } as ZodOpenApiOperationObject
 }
 
+const groupWords: Readonly<Record<string, string>> = {
+  Accounts: 'Signing in and out, the own account, links by mail',
+  Teams: 'Teams, their members and invitations',
+  Tokens: 'Keys of robots',
+  Push: 'Bringing results',
+  Sets: 'Template sets of a team',
+  Versions: 'Versions, baselines and comparisons',
+  Review: 'Comments, decisions and known failures',
+  Publication: 'Labels, errata, recalls and public pages',
+  'Number sheet': 'Measures for the editor to tick',
+  'Test builds': 'Testers, their reports, predicted against measured',
+  Notices: 'What people are told',
+  Webhooks: 'What programs are told',
+  Audit: 'Who did what',
+  Retention: 'How long versions are kept',
+  Papers: 'Measured thicknesses',
+  Upkeep: 'Work that failed',
+  Health: 'For monitors and generators of clients',
+}
+
 /** The OpenAPI document of every endpoint. */
 export function openApiDocument(): object {
   const paths: Record<string, Record<string, ZodOpenApiOperationObject>> = {}
@@ -75,7 +95,10 @@ export function openApiDocument(): object {
       description: 'The record of what was checked, who approved it and what was published.',
     },
     servers: [{ url: '/' }],
-    tags: [...new Set(endpointList.map(({ group }) => group))].map((name) => ({ name })),
+    tags: [...new Set(endpointList.map(({ group }) => group))].map((name) => ({
+      name,
+      description: groupWords[name] ?? name,
+    })),
     paths: paths as ZodOpenApiPathsObject,
     components: {
       securitySchemes: {

@@ -128,26 +128,24 @@ describe('webhooks', () => {
     expect(again.state).toBe('active')
   })
 
-  it.each([
-    'http://127.0.0.1/',
-    'http://localhost:8080/',
-    'http://[::1]/',
-    'http://169.254.169.254/latest',
-    'http://10.0.0.7/',
-    'http://[::ffff:192.168.0.1]/',
-    'http://0x7f000001/',
-  ])('never go to %s', async (url) => {
+  it('never go to private addresses, however these are written', async () => {
     const strict = await startTestServer()
-    try {
-      const { owner } = await createTeam(strict, 'strict')
-      const refused = await owner.refusal(endpoints.addWebhook, {
-        params: { team: 'strict' },
-        body: { url, events: ['published'] },
-      })
-      expect(refused.code).toBe('private-address')
-    } finally {
-      await strict.stop()
+    const { owner } = await createTeam(strict, 'strict')
+    const hosts = [
+      '127.0.0.1',
+      'localhost:8080',
+      '[::1]',
+      '169.254.169.254',
+      '10.0.0.7',
+      '[::ffff:192.168.0.1]',
+      '0x7f000001',
+    ]
+    for (const host of hosts) {
+      const body = { url: `http://${host}/`, events: ['published' as const] }
+      const refused = await owner.refusal(endpoints.addWebhook, { params: { team: 'strict' }, body })
+      expect([host, refused.code]).toEqual([host, 'private-address'])
     }
+    await strict.stop()
   })
 
   it('tell public addresses from private ones, also in their other forms', () => {

@@ -5,6 +5,7 @@ import { words } from './words.ts'
 const millimetres = z.number().positive().max(5_000)
 
 export const feels = ['will-not-go', 'tight', 'good', 'loose', 'falls-off'] as const
+export type Feel = (typeof feels)[number]
 
 /** What a tester reports; lengths are millimetres. */
 export const buildReportShape = z
@@ -123,6 +124,6 @@ export const fitStudyShape = z
     n: z.int(),
     went: z.int(),
     atLeast: words.share.nullable().describe('lower end of the 95 % interval of the share'),
-    felt: z.record(z.enum(feels), z.int()),
+    felt: z.strictObject(Object.fromEntries(feels.map((feel) => [feel, z.int()])) as Record<Feel, z.ZodInt>),
   })
   .meta({ id: 'FitStudy' })
