@@ -2,6 +2,7 @@ import { readdirSync, readFileSync } from 'node:fs'
 import { fileURLToPath } from 'node:url'
 import { defineConfig, type Plugin, type Rolldown } from 'vite'
 import react from '@vitejs/plugin-react'
+import { keepCompiled } from './server/dev/keep-compiled.ts'
 import tailwindcss from '@tailwindcss/vite'
 
 type ChunkingContext = Rolldown.ChunkingContext
@@ -56,7 +57,7 @@ export default defineConfig(({ isSsrBuild, mode }) =>
   isSsrBuild === true
     ? {
         publicDir: false,
-        plugins: [shipFonts],
+        plugins: [shipFonts, ...(mode === 'server' || mode === 'bench' ? [] : [keepCompiled('check')])],
         // Modules that can be joined to the bundle's own; for Node the package offers others, wrapped one by one.
         resolve: { alias: { yaml: path('node_modules/yaml/browser/index.js') } },
         build: {
@@ -68,6 +69,7 @@ export default defineConfig(({ isSsrBuild, mode }) =>
           rolldownOptions: {
             input: inputs(mode).input,
             output: {
+              ...(mode === 'server' || mode === 'bench' ? {} : { format: 'cjs' as const }),
               entryFileNames: '[name].js',
               chunkFileNames: 'chunks/[name]-[hash].js',
               ...(mode === 'server' ? {} : { codeSplitting: { groups: startingChunks } }),

@@ -47,4 +47,6 @@ const io: Io = {
   readStandardInput: readAll,
 }
 
-process.exitCode = await run(process.argv.slice(2), io)
+void run(process.argv.slice(2), io).then((code) => {
+  process.exitCode = code
+})

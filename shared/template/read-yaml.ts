@@ -30,7 +30,6 @@ const codeOf = (character: string): string =>
 
 /** Characters that no text editor writes: a file in another encoding, or no text at all. */
 function findStrayCharacter(source: SourceText, problems: ProblemList): boolean {
-  // eslint-disable-next-line no-control-regex -- these are the characters that are refused
   const found = /[\u0000-\u0008\u000B\u000C\u000E-\u001F\u007F\uFFFD\uFFFE\uFFFF]|\r(?!\n)/.exec(source.text)
   if (found === null) return false
   const isReturn = found[0] === '\r'
