@@ -224,10 +224,21 @@ export function checkTemplate(text: string, workspace: Workspace, options: Check
   try {
     return checkSet(reading.set, options)
   } catch (error) {
-    if (!(error instanceof ImpossiblePiece)) throw error
-    return invalidReport(reading, text, workspace, options, [impossible(reading.set, error)])
+    if (error instanceof ImpossiblePiece) {
+      return invalidReport(reading, text, workspace, options, [impossible(reading.set, error)])
+    }
+    // A defect in one set must not take the reports of the others with it.
+    const report = invalidReport(reading, text, workspace, options, [defect(reading.set, error)])
+    return { ...report, summary: { ...report.summary, crashed: 1 } }
   }
 }
+
+const defect = (set: TemplateSet, error: unknown): Problem => ({
+  code: 'defect',
+  message: `This set could not be judged, which is a defect of Foldgauge: ${error instanceof Error ? error.message : String(error)}.`,
+  hint: 'Please report it together with the set; the other sets were judged.',
+  at: set.placeOf(['set']),
+})
 
 const impossible = (set: TemplateSet, { piece, message, hint, key }: ImpossiblePiece): Problem => ({
   code: 'piece-impossible',

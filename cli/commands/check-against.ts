@@ -32,6 +32,9 @@ export function holdAgainst(
   }
 }
 
+/** False where a set could not be compared: a gate must not open because nobody could tell. */
+export const isTold = ({ comparisons }: Against): boolean => comparisons.every((comparison) => comparison.isComparable)
+
 /** Something got worse, or a set nobody knew before fails. Two engines cannot be compared, which passes nothing. */
 export const gotWorse = ({ comparisons, newcomers }: Against): boolean =>
   comparisons.some(
@@ -46,6 +49,10 @@ export function againstText(against: Against, word: string, presentation: Presen
     { added: newcomers.map((report) => report.set), removed: [] },
     presentation,
   )
-  const verdict = gotWorse(against) ? `Worse than ${word}.` : `Nothing is worse than ${word}.`
+  const verdict = gotWorse(against)
+    ? `Worse than ${word}.`
+    : isTold(against)
+      ? `Nothing is worse than ${word}.`
+      : `Nobody can tell whether this is worse than ${word}: not every set could be compared.`
   return `\n${text}\n${verdict}\n`
 }

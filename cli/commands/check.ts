@@ -106,7 +106,25 @@ export function judgeInputs(
     return checkTemplate(input.text, input.found.workspace, { ...options, file: input.file })
   })
   progress.done()
-  return reports
+  return reports.map((report, index) => {
+    const twin = inputs.findIndex(
+      (other, at) =>
+        at < index && other.found.folder === inputs[index]?.found.folder && reports[at]?.set === report.set,
+    )
+    return twin === -1 || report.summary.verdict === 'invalid' ? report : sameName(report, inputs[twin]?.file ?? '')
+  })
+}
+
+/** Comparisons match sets by their names, so two of one name in a workspace cannot both be judged. */
+function sameName(report: Report, other: string): Report {
+  const at = { file: report.file, line: 1, column: 1, endLine: 1, endColumn: 1, path: ['set'] }
+  const message = `The set in ${other} is called “${report.set}” too.`
+  const hint = 'Give each set of a workspace a name of its own.'
+  return {
+    ...report,
+    errors: [{ code: 'set-name-twice', message, hint, at }],
+    summary: { ...report.summary, verdict: 'invalid' },
+  }
 }
 
 function present(
@@ -215,7 +233,7 @@ async function exitAgainst(
   reports: readonly Report[],
   options: AgainstOptions,
 ): Promise<ExitCode> {
-  const { againstText, gotWorse, holdAgainst } = await import('./check-against.ts')
+  const { againstText, gotWorse, holdAgainst, isTold } = await import('./check-against.ts')
   const against = holdAgainst(io, word, reports, options.judging)
   // Standard output carries the report; beside a report for programs the comparison goes to standard error.
   const text = againstText(against, word, options.presentation)
@@ -224,6 +242,7 @@ async function exitAgainst(
   if (options.failOn !== 'regression') return exitOf(reports, options.failOn)
   const unusable = exitOf(reports, 'fail')
   if (unusable === exitCode.unusable || unusable === exitCode.defect) return unusable
+  if (!isTold(against)) return exitCode.unusable
   return gotWorse(against) ? exitCode.failed : exitCode.clean
 }
 

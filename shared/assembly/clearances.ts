@@ -5,7 +5,7 @@ import type { AxisName } from '../report/report.ts'
 import type { Fit } from '../template/template-model.ts'
 import { add, apply, constant, scale, subtract } from '../uncertainty/arithmetic.ts'
 import type { Dimension } from '../uncertainty/dimension.ts'
-import { goesAroundNothing, holdsNothing } from './impossible-fit.ts'
+import { goesAroundNothing, goesOverNothing, holdsNothing } from './impossible-fit.ts'
 import type { Load } from './loads.ts'
 import { requirementOf, type FitCase, type Requirement } from './requirements.ts'
 import type { SetModel } from './set-model.ts'
@@ -244,6 +244,7 @@ function lidOver(model: SetModel, fit: Fit, lid: FoldedPiece): FitClearances {
   const base = model.folded(fit.to)
   const cavity = lid.cavity
   if (cavity === null) throw holdsNothing(fit, lid)
+  if (cavity.shape !== 'tray') throw goesOverNothing(fit, lid)
   const seat = model.seat(fit.to)
   const isTurned = fit.turn === 'quarter'
   const sides = (['length', 'width'] as const).map((axis) => {

@@ -23,3 +23,13 @@ export function goesAroundNothing(fit: Fit, piece: FoldedPiece, inner: string): 
     'Write “in” with the piece that holds the other, or “over” for a lid.',
   )
 }
+
+/** What is told of a fit that puts something over another that is not open below, as a lid is. */
+export function goesOverNothing(fit: Fit, piece: FoldedPiece): ImpossiblePiece {
+  const { name } = piece.given
+  return new ImpossiblePiece(
+    name,
+    `Fit ${fit.id} puts ${name} over ${fit.to}, and only a lid or another piece with an inside and a depth goes over a piece.`,
+    'Write “in” with the piece that holds the other, or “around” for a sleeve or band.',
+  )
+}

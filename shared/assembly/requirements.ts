@@ -58,6 +58,7 @@ export function requirementOf(
   const own = fit.clearance
   const given = own === null ? null : givenBand(own, axis)
   const isStrict = own?.strict ?? false
-  if (given !== null) return { band: given, from: own?.name ?? 'set', isStrict }
+  // Without a lower end a thing must still go in: nothing may be smaller than what it holds.
+  if (given !== null) return { band: { min: given.min ?? 0, max: given.max }, from: own?.name ?? 'set', isStrict }
   return { band: defaultBand(fitCase, axis, contentSize, isOpen), from: 'default', isStrict }
 }

@@ -54,3 +54,10 @@ export function panelsOfBlank(panels: readonly Millimetres[], blankAcross: Milli
 /** Layers of card over one another when folded shut. */
 export const foldedLayers = (given: CardGiven): number =>
   given.fold === 'none' ? 1 : given.style === 'gate' ? 2 : given.style === 'single' ? 2 : given.panels
+
+/** Where the folds lie on the sheet, from one edge: a gate's leaves stand on either side of its middle panel. */
+export function foldPositions(given: CardGiven, panels: readonly Millimetres[]): readonly Millimetres[] {
+  const [wide = 0, leaf = 0] = panels
+  if (given.style === 'gate') return [leaf, leaf + wide]
+  return panels.slice(0, -1).map((_, index) => panels.slice(0, index + 1).reduce((total, panel) => total + panel, 0))
+}

@@ -3,7 +3,7 @@ import type { Dimension } from '../../uncertainty/dimension.ts'
 import type { Millimetres } from '../../units/units.ts'
 import type { FoldContext } from '../fold-context.ts'
 import type { Cavity, FoldedPiece, Measure } from '../folded-piece.ts'
-import { closedPanel } from '../folds.ts'
+import { closedPanel, outsideFlatFolds } from '../folds.ts'
 import {
   betweenScores,
   cutExtent,
@@ -16,7 +16,7 @@ import {
 } from '../making.ts'
 import { modelDefaults } from '../model-defaults.ts'
 import type { CardGiven } from './card-given.ts'
-import { cardPanels, foldedLayers, foldedSize, panelsOfBlank, type FoldedSize } from './card-panels.ts'
+import { cardPanels, foldedLayers, foldedSize, foldPositions, panelsOfBlank, type FoldedSize } from './card-panels.ts'
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0)
 
@@ -88,22 +88,46 @@ export function foldCard(given: CardGiven, context: FoldContext): FoldedPiece {
     const total = sum(panels)
     const widest = Math.max(...panels)
     const blankAcross = measure('blank across the fold', total, 'cut')
-    const foldMark = measure('fold', panels[0] ?? widest, 'score')
-    const panel = betweenScores(
-      given,
-      context,
-      across,
-      widest,
-      [
-        cutSource(given, context, across, given.made === 'printed' ? 0.5 : 1 / panels.length),
-        scoreSource(given, context, across, 1, 1),
-      ],
-      [
-        { measure: blankAcross, coefficient: 1 },
-        { measure: foldMark, coefficient: 1 },
-      ],
+    const folds = foldPositions(given, panels).map((position, index, all) =>
+      measure(all.length === 1 ? 'fold' : `fold ${String(index + 1)}`, position, 'score'),
     )
-    const closed = closedPanel(panel, hinge, caliper)
+    const [first, second] = folds
+    const closed =
+      given.style === 'gate' && first !== undefined && second !== undefined
+        ? // The middle of a gate lies between two folds, as the face of an envelope does.
+          outsideFlatFolds(
+            betweenScores(
+              given,
+              context,
+              across,
+              widest,
+              [scoreSource(given, context, across, 1, -1), scoreSource(given, context, across, 2, 1)],
+              [
+                { measure: first, coefficient: -1 },
+                { measure: second, coefficient: 1 },
+              ],
+            ),
+            hinge,
+            caliper,
+          )
+        : closedPanel(
+            betweenScores(
+              given,
+              context,
+              across,
+              widest,
+              [
+                cutSource(given, context, across, given.made === 'printed' ? 0.5 : 1 / panels.length),
+                scoreSource(given, context, across, 1, 1),
+              ],
+              [
+                { measure: blankAcross, coefficient: 1 },
+                ...(first === undefined ? [] : [{ measure: first, coefficient: 1 }]),
+              ],
+            ),
+            hinge,
+            caliper,
+          )
     const plain = flat(along)
     length = across === 'length' ? closed : plain
     width = across === 'width' ? closed : plain

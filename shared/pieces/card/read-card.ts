@@ -106,7 +106,9 @@ export function readCard(name: string, written: CardWritten, read: ValueReader):
         ? null
         : {
             depth: read.length(['pocket', 'depth'], written.pocket.depth),
-            side: read.lengthOr(['pocket', 'side'], written.pocket.side, languageDefaults.cardPocketSide.value, { allowZero: true }),
+            side: read.lengthOr(['pocket', 'side'], written.pocket.side, languageDefaults.cardPocketSide.value, {
+              allowZero: true,
+            }),
           },
   }
 }
