@@ -17,7 +17,16 @@ const isStale = (built, sources) => {
 }
 
 export function buildCommandLine() {
-  if (!isStale('dist/cli/foldgauge.js', ['cli', 'shared', 'vite.config.ts', 'package-lock.json'])) return
+  if (
+    !isStale('dist/cli/foldgauge.js', [
+      'cli',
+      'shared',
+      'server/dev/keep-compiled.ts',
+      'vite.config.ts',
+      'package-lock.json',
+    ])
+  )
+    return
   runStep('Building the command line', process.execPath, [
     'node_modules/vite/bin/vite.js',
     'build',
