@@ -27,6 +27,7 @@ export default tseslint.config(
         process: 'readonly',
         URL: 'readonly',
         setTimeout: 'readonly',
+        clearTimeout: 'readonly',
         Buffer: 'readonly',
       },
     },
