@@ -28,6 +28,7 @@ export default tseslint.config(
         URL: 'readonly',
         setTimeout: 'readonly',
         clearTimeout: 'readonly',
+        clearTimeout: 'readonly',
         Buffer: 'readonly',
       },
     },
