@@ -57,10 +57,7 @@ async function start(config: Config, parts: ReadonlySet<string>): Promise<void> 
   const metricsServer =
     config.METRICS_PORT === undefined ? null : await serveMetrics(metrics.registry, config.METRICS_PORT)
   const mailer = isWorking ? createMailer(config) : null
-  if (mailer !== null) {
-    await runWorker(boss, { ...context, mailer }, metrics)
-    log.info('worker ready')
-  }
+  const worker = mailer === null ? null : await runWorker(boss, { ...context, mailer }, metrics)
   const server = parts.has('server') ? await serve(context, metrics) : null
 
   let isStopping = false
@@ -68,7 +65,8 @@ async function start(config: Config, parts: ReadonlySet<string>): Promise<void> 
     if (isStopping) return
     isStopping = true
     await server?.stop()
-    await boss.stop({ graceful: isWorking, timeout: patience, close: false })
+    await Promise.race([worker?.stop(), new Promise((fulfil) => setTimeout(fulfil, patience).unref())])
+    await boss.stop({ graceful: false, close: false })
     metricsServer?.close()
     mailer?.close()
     objects.close()

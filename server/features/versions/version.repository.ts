@@ -10,6 +10,10 @@ import { Version } from './version.entity.ts'
 export const findSet = (manager: EntityManager, teamId: string, name: string): Promise<TemplateSet | null> =>
   manager.findOneBy(TemplateSet, { teamId, name })
 
+/** A version by its number. Without a limit, for that would tempt the planner to read until it meets one. */
+export const findVersion = async (manager: EntityManager, setId: string, number: number): Promise<Version | null> =>
+  (await manager.findBy(Version, { setId, number }))[0] ?? null
+
 /** A set and one of its versions. @throws Refusal 404 */
 export async function getVersion(
   manager: EntityManager,
@@ -20,10 +24,7 @@ export async function getVersion(
   const set = found(await findSet(manager, teamId, setName))
   return {
     set,
-    version: found(
-      await manager.findOneBy(Version, { setId: set.id, number }),
-      `${setName} has no version ${String(number)}.`,
-    ),
+    version: found(await findVersion(manager, set.id, number), `${setName} has no version ${String(number)}.`),
   }
 }
 

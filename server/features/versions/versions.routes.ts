@@ -12,7 +12,7 @@ import { compareVersions, presentReport } from './compare-versions.service.ts'
 import { trendOf } from './trend.ts'
 import { presentWholeVersion } from './version-detail.presenter.ts'
 import { presentVersion } from './version.presenter.ts'
-import { companyOf, findSet, getVersion, listVersions, textsOf } from './version.repository.ts'
+import { companyOf, findSet, findVersion, getVersion, listVersions, textsOf } from './version.repository.ts'
 import { publishedVersionOf } from './published-version.ts'
 import { Version } from './version.entity.ts'
 
@@ -100,7 +100,7 @@ export const versionRoutes: readonly Route[] = [
     const { set, version } = await getVersion(manager, access.team.id, params.set, params.number)
     const isAsked = query.with !== undefined
     const before = isAsked
-      ? await manager.findOneBy(Version, { setId: set.id, number: query.with ?? 0 })
+      ? await findVersion(manager, set.id, query.with ?? 0)
       : version.baselineId === null
         ? null
         : await manager.findOneBy(Version, { id: version.baselineId })
