@@ -1,3 +1,5 @@
+import { existsSync } from 'node:fs'
+import { resolve } from 'node:path'
 import { compareReports, hasRegression } from '../../shared/compare/compare-reports.ts'
 import type { Comparison } from '../../shared/compare/comparison.ts'
 import type { CheckOptions } from '../../shared/check-options.ts'
@@ -13,14 +15,32 @@ export interface Against {
   readonly newcomers: readonly Report[]
 }
 
-/** Compares reports with those that a word names, set by set. @throws UsageError where the word names nothing */
-export function holdAgainst(
+/** What a word names: files and revisions here, or what the server has published or on a branch. */
+async function sideOf(
   io: Io,
   word: string,
   reports: readonly Report[],
   judging: Omit<CheckOptions, 'file'>,
-): Against {
-  const before = resolveSide(io, word, judging)
+): Promise<readonly Report[]> {
+  const isOnServer = (word === 'published' || word.startsWith('branch:')) && !existsSync(resolve(io.cwd, word))
+  if (!isOnServer) return resolveSide(io, word, judging)
+  const { namedReports } = await import('../push/named-reports.ts')
+  return namedReports(
+    io,
+    word,
+    reports.map(({ set }) => set),
+    judging,
+  )
+}
+
+/** Compares reports with those that a word names, set by set. @throws UsageError where the word names nothing */
+export async function holdAgainst(
+  io: Io,
+  word: string,
+  reports: readonly Report[],
+  judging: Omit<CheckOptions, 'file'>,
+): Promise<Against> {
+  const before = await sideOf(io, word, reports, judging)
   const known = (report: Report): Report | undefined =>
     before.length === 1 && reports.length === 1 ? before[0] : before.find((old) => old.set === report.set)
   return {

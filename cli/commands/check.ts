@@ -156,7 +156,10 @@ const usages: readonly OptionUsage[] = [
     isRepeated: true,
   },
   { flags: '--single', about: 'with json: one object instead of an array' },
-  { flags: '--against <what>', about: 'also compare with a report, a set, a folder or a git revision' },
+  {
+    flags: '--against <what>',
+    about: 'also compare with a report, a set, a folder, a git revision, or published or branch:NAME on a server',
+  },
   {
     flags: '--fail-on <what>',
     about: 'what makes the exit code 1: fail, warn, or with --against only regression',
@@ -234,7 +237,7 @@ async function exitAgainst(
   options: AgainstOptions,
 ): Promise<ExitCode> {
   const { againstText, gotWorse, holdAgainst, isTold } = await import('./check-against.ts')
-  const against = holdAgainst(io, word, reports, options.judging)
+  const against = await holdAgainst(io, word, reports, options.judging)
   // Standard output carries the report; beside a report for programs the comparison goes to standard error.
   const text = againstText(against, word, options.presentation)
   if (options.isText) io.out(text)

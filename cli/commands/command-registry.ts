@@ -25,6 +25,16 @@ export const commandEntries: readonly CommandEntry[] = [
     load: async () => (await import('./compare.ts')).compareCommand,
   },
   {
+    name: 'push',
+    summary: 'send what was checked to the server of your team',
+    load: async () => (await import('./push.ts')).pushCommand,
+  },
+  {
+    name: 'login',
+    summary: 'keep a token for a server',
+    load: async () => (await import('./login.ts')).loginCommand,
+  },
+  {
     name: 'explain',
     summary: 'tell why a rule exists and where a figure comes from',
     load: async () => (await import('./explain.ts')).explainCommand,
