@@ -16,7 +16,8 @@ export function lineChanges(before: string, after: string): readonly LineChange[
   let head = 0
   while (head < a.length && head < b.length && a[head] === b[head]) head += 1
   let tail = 0
-  while (tail < a.length - head && tail < b.length - head && a[a.length - 1 - tail] === b[b.length - 1 - tail]) tail += 1
+  while (tail < a.length - head && tail < b.length - head && a[a.length - 1 - tail] === b[b.length - 1 - tail])
+    tail += 1
   const [mine, theirs] = [a.slice(head, a.length - tail), b.slice(head, b.length - tail)]
   const [rows, columns] = [mine.length, theirs.length]
   const isLong = rows * columns > 4_000_000

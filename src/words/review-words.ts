@@ -21,7 +21,8 @@ export const reviewWords = {
   overridden: (reason: string) => `alone, because ${reason}`,
   comments: 'Comments',
   noComments: 'No comment yet.',
-  unresolved: (count: number) => (count === 0 ? 'Nothing unresolved.' : `${plural(count, 'comment is', 'comments are')} unresolved.`),
+  unresolved: (count: number) =>
+    count === 0 ? 'Nothing unresolved.' : `${plural(count, 'comment is', 'comments are')} unresolved.`,
   about: 'About',
   wholeVersion: 'the whole version',
   body: 'Comment',

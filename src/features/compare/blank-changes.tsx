@@ -22,11 +22,22 @@ function changesOf(before: Blanks, after: Blanks): readonly Change[] {
   const [old, now] = [all(before), all(after)]
   return [...new Set([...old.keys(), ...now.keys()])]
     .map((name) => ({ name, before: old.get(name) ?? null, after: now.get(name) ?? null }))
-    .filter((change) => change.before === null || change.after === null || pairLines(change.before, change.after).some(({ isMoved }) => isMoved))
+    .filter(
+      (change) =>
+        change.before === null ||
+        change.after === null ||
+        pairLines(change.before, change.after).some(({ isMoved }) => isMoved),
+    )
 }
 
 /** Blanks that differ between two versions, both drawn by the present engine. */
-export function BlankChanges({ before, after }: { readonly before: VersionText; readonly after: VersionText }): ReactNode {
+export function BlankChanges({
+  before,
+  after,
+}: {
+  readonly before: VersionText
+  readonly after: VersionText
+}): ReactNode {
   const old = useQuery(blanksQuery(before))
   const now = useQuery(blanksQuery(after))
   return (

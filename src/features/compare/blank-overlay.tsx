@@ -53,12 +53,20 @@ function Choice<T extends string | number>({
 }
 
 /** Old and new blank over each other; what moved is thick and may be drawn several times as far. Never flashes by itself. */
-export default function BlankOverlay({ before, after }: { readonly before: Blank; readonly after: Blank }): JSX.Element {
+export default function BlankOverlay({
+  before,
+  after,
+}: {
+  readonly before: Blank
+  readonly after: Blank
+}): JSX.Element {
   const [shown, setShown] = useState<Shown>('both')
   const [factor, setFactor] = useState<(typeof choices)[number]>(5)
   const pairs = useMemo(() => pairLines(before, after), [before, after])
   const moved = pairs.filter(({ isMoved }) => isMoved).length
-  const points = pairs.flatMap((pair) => [pair.before, enlarged(pair, factor)].flatMap((line) => (line === null ? [] : [line.from, line.to])))
+  const points = pairs.flatMap((pair) =>
+    [pair.before, enlarged(pair, factor)].flatMap((line) => (line === null ? [] : [line.from, line.to])),
+  )
   const xs = points.map(({ x }) => x)
   const ys = points.map(({ y }) => -y)
   const air = 4
@@ -67,8 +75,20 @@ export default function BlankOverlay({ before, after }: { readonly before: Blank
   return (
     <figure>
       <div className="no-print mb-2 flex flex-wrap gap-x-6 gap-y-2">
-        <Choice legend={blankWords.show} options={['both', 'before', 'after']} chosen={shown} nameOf={(name) => names[name]} onChoose={setShown} />
-        <Choice legend={blankWords.enlarge} options={choices} chosen={factor} nameOf={blankWords.enlarged} onChoose={setFactor} />
+        <Choice
+          legend={blankWords.show}
+          options={['both', 'before', 'after']}
+          chosen={shown}
+          nameOf={(name) => names[name]}
+          onChoose={setShown}
+        />
+        <Choice
+          legend={blankWords.enlarge}
+          options={choices}
+          chosen={factor}
+          nameOf={blankWords.enlarged}
+          onChoose={setFactor}
+        />
       </div>
       <svg
         viewBox={`${String(left)} ${String(top)} ${String(Math.max(...xs) + air - left)} ${String(Math.max(...ys) + air - top)}`}

@@ -36,16 +36,22 @@ export function Flips({ changes }: { readonly changes: Comparison['changes'] }):
       {changes
         .toSorted((a, b) => order.indexOf(a.flip) - order.indexOf(b.flip))
         .map((change) => (
-          <li key={change.fingerprint} className={`border-l-4 pl-3 ${change.isRegression ? 'border-fail' : 'border-hair'}`}>
+          <li
+            key={change.fingerprint}
+            className={`border-l-4 pl-3 ${change.isRegression ? 'border-fail' : 'border-hair'}`}
+          >
             <p className="flex flex-wrap items-baseline gap-x-3">
               <StateMark state={flipStates[change.flip]}>{compareWords.flipNames[change.flip]}</StateMark>
               <span className="font-semibold">{change.subject}</span>
               <span className="label">
-                {change.rule} · {change.before === null ? '–' : stateWords[change.before]} → {change.after === null ? '–' : stateWords[change.after]}
+                {change.rule} · {change.before === null ? '–' : stateWords[change.before]} →{' '}
+                {change.after === null ? '–' : stateWords[change.after]}
               </span>
             </p>
             <p>{change.message}</p>
-            {change.causes.length === 0 ? null : <p className="text-sm text-soft">{compareWords.because(change.causes.slice(0, 4))}</p>}
+            {change.causes.length === 0 ? null : (
+              <p className="text-sm text-soft">{compareWords.because(change.causes.slice(0, 4))}</p>
+            )}
           </li>
         ))}
     </ul>
@@ -73,7 +79,8 @@ export function Margins({ comparison }: { readonly comparison: Comparison }): JS
               isFigure: true,
               cell: (row) => (
                 <>
-                  {lengthIn(row.clearance.before, units).replace(/ (mm|in)$/, '')} → {lengthIn(row.clearance.after, units)}
+                  {lengthIn(row.clearance.before, units).replace(/ (mm|in)$/, '')} →{' '}
+                  {lengthIn(row.clearance.after, units)}
                 </>
               ),
             },
@@ -81,7 +88,8 @@ export function Margins({ comparison }: { readonly comparison: Comparison }): JS
             {
               name: compareWords.goes,
               isFigure: true,
-              cell: (row) => `${String(goes(row.binds.before, row.rattles.before))} → ${String(goes(row.binds.after, row.rattles.after))}`,
+              cell: (row) =>
+                `${String(goes(row.binds.before, row.rattles.before))} → ${String(goes(row.binds.after, row.rattles.after))}`,
             },
             {
               name: compareWords.moved,
@@ -139,7 +147,8 @@ export function Matings({ comparison }: { readonly comparison: Comparison }): JS
   return (
     <>
       <p className="mb-2 font-semibold">
-        <StateMark state={oldPiecesMate ? 'pass' : 'fail'} /> {oldPiecesMate ? compareWords.mateYes : compareWords.mateNo}
+        <StateMark state={oldPiecesMate ? 'pass' : 'fail'} />{' '}
+        {oldPiecesMate ? compareWords.mateYes : compareWords.mateNo}
       </p>
       <ul className="space-y-1 text-sm">
         {matings.map((mating) => (

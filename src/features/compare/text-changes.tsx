@@ -23,7 +23,12 @@ export function TextChanges({ before, after }: { readonly before: string; readon
   return (
     <>
       <p className="label mb-1">{compareWords.lines(count('added'), count('removed'))}</p>
-      <div className="overflow-x-auto border border-hair" tabIndex={0} role="region" aria-label={compareWords.textTitle}>
+      <div
+        className="overflow-x-auto border border-hair"
+        tabIndex={0}
+        role="region"
+        aria-label={compareWords.textTitle}
+      >
         <ol className="figure min-w-max text-[0.82rem] leading-6">
           {shown(lines).map((line, index) =>
             line === null ? (
@@ -39,7 +44,9 @@ export function TextChanges({ before, after }: { readonly before: string; readon
                   {signs[line.kind]}
                 </span>
                 {line.kind === 'same' ? null : (
-                  <span className="sr-only">{line.kind === 'removed' ? compareWords.removed : compareWords.added}: </span>
+                  <span className="sr-only">
+                    {line.kind === 'removed' ? compareWords.removed : compareWords.added}:{' '}
+                  </span>
                 )}
                 <code className="whitespace-pre pr-4">{line.text === '' ? ' ' : line.text}</code>
               </li>

@@ -18,7 +18,7 @@ export interface WorkspaceText {
 let last: { readonly text: string; readonly read: Workspace } | null = null
 
 /** While somebody types in a set its workspace stays the same: it is read once. */
-function workspaceOf(given: WorkspaceText | null): Workspace {
+export function workspaceOf(given: WorkspaceText | null): Workspace {
   if (given === null) return emptyWorkspace()
   if (last?.text !== given.text) last = { text: given.text, read: readWorkspace(given.text, given.file, ruleNames) }
   return last.read

@@ -18,7 +18,8 @@ export const numberSheetQuery = ({ team, set, number }: Place) =>
     queryFn: ({ signal }) => call(numberSheetEndpoints.numberSheet, { params: { team, set, number }, signal }),
   })
 
-export const numbersCsvAddress = (place: Place): string => fileAddress(numberSheetEndpoints.numberSheetCsv, { params: place })
+export const numbersCsvAddress = (place: Place): string =>
+  fileAddress(numberSheetEndpoints.numberSheetCsv, { params: place })
 
 interface Tick {
   readonly keys: string[]
@@ -34,7 +35,9 @@ const counted = (items: Measure[]): NumberSheet => ({
 })
 
 /** Ticks at once and takes it back where the server refuses: unticking undoes it anyway. */
-export function useTick(place: Place): UseMutationResult<NumberSheet, Error, Tick, { readonly before: NumberSheet | undefined }> {
+export function useTick(
+  place: Place,
+): UseMutationResult<NumberSheet, Error, Tick, { readonly before: NumberSheet | undefined }> {
   const client = useQueryClient()
   const { queryKey } = numberSheetQuery(place)
   return useMutation({

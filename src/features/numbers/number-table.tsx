@@ -41,7 +41,9 @@ export function NumberTable({
           name: numbersWords.measure,
           isHead: true,
           cell: (item) => (
-            <span className={item.state === 'open' || item.state === 'changed' ? 'border-b-2 border-warn' : ''}>{item.what}</span>
+            <span className={item.state === 'open' || item.state === 'changed' ? 'border-b-2 border-warn' : ''}>
+              {item.what}
+            </span>
           ),
         },
         {

@@ -30,7 +30,15 @@ export function QueryForm({
       >
         <Field label={numbersWords.queryNote}>
           {(parts) => (
-            <textarea {...parts} required rows={3} maxLength={limits.note} className="field" value={note} onChange={({ target }) => setNote(target.value)} />
+            <textarea
+              {...parts}
+              required
+              rows={3}
+              maxLength={limits.note}
+              className="field"
+              value={note}
+              onChange={({ target }) => setNote(target.value)}
+            />
           )}
         </Field>
         <div className="flex gap-3">

@@ -43,18 +43,38 @@ function Form({ place, proposal }: { readonly place: Place; readonly proposal: P
     >
       <Field label={publicationWords.label} hint={`${publicationWords.steps[proposal.step]}: ${proposal.why}`}>
         {(parts) => (
-          <input {...parts} required pattern="\d{1,4}\.\d{1,4}\.\d{1,4}" className="field figure max-w-40" value={label} onChange={({ target }) => setLabel(target.value)} />
+          <input
+            {...parts}
+            required
+            pattern="\d{1,4}\.\d{1,4}\.\d{1,4}"
+            className="field figure max-w-40"
+            value={label}
+            onChange={({ target }) => setLabel(target.value)}
+          />
         )}
       </Field>
       <Field label={publicationWords.notes}>
         {(parts) => (
-          <textarea {...parts} rows={2} maxLength={limits.note} className="field" value={notes} onChange={({ target }) => setNotes(target.value)} />
+          <textarea
+            {...parts}
+            rows={2}
+            maxLength={limits.note}
+            className="field"
+            value={notes}
+            onChange={({ target }) => setNotes(target.value)}
+          />
         )}
       </Field>
       {proposal.blockers.length === 0 ? null : (
         <Field label={publicationWords.override} hint={publicationWords.overrideHint}>
           {(parts) => (
-            <input {...parts} maxLength={limits.reason} className="field" value={reason} onChange={({ target }) => setReason(target.value)} />
+            <input
+              {...parts}
+              maxLength={limits.reason}
+              className="field"
+              value={reason}
+              onChange={({ target }) => setReason(target.value)}
+            />
           )}
         </Field>
       )}
@@ -94,7 +114,9 @@ export function PublishForm({ place, canPublish }: { readonly place: Place; read
           <ul className="mt-3 space-y-1 text-sm" aria-label={publicationWords.checklist}>
             {data.checklist.map(({ item, isDone }) => (
               <li key={item} className="flex flex-wrap items-baseline gap-2">
-                <StateMark state={isDone ? 'ticked' : 'open'}>{isDone ? publicationWords.done : publicationWords.notDone}</StateMark>
+                <StateMark state={isDone ? 'ticked' : 'open'}>
+                  {isDone ? publicationWords.done : publicationWords.notDone}
+                </StateMark>
                 <span>{item}</span>
               </li>
             ))}

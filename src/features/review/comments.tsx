@@ -86,7 +86,15 @@ function CommentForm({ place, report }: { readonly place: Place; readonly report
   )
 }
 
-function CommentEntry({ place, comment, canResolve }: { readonly place: Place; readonly comment: Comment; readonly canResolve: boolean }): JSX.Element {
+function CommentEntry({
+  place,
+  comment,
+  canResolve,
+}: {
+  readonly place: Place
+  readonly comment: Comment
+  readonly canResolve: boolean
+}): JSX.Element {
   const client = useQueryClient()
   const resolve = useMutation({
     mutationFn: (isResolved: boolean) =>
@@ -112,7 +120,13 @@ function CommentEntry({ place, comment, canResolve }: { readonly place: Place; r
       <p className="flex flex-wrap items-center gap-3 text-sm">
         {isResolved ? <span className="text-soft">{reviewWords.resolved(comment.resolvedBy ?? '')}</span> : null}
         {canResolve ? (
-          <button type="button" className="button" data-size="small" disabled={resolve.isPending} onClick={() => resolve.mutate(!isResolved)}>
+          <button
+            type="button"
+            className="button"
+            data-size="small"
+            disabled={resolve.isPending}
+            onClick={() => resolve.mutate(!isResolved)}
+          >
             {isResolved ? reviewWords.reopen : reviewWords.resolve}
           </button>
         ) : null}
@@ -143,7 +157,11 @@ export function Comments({
         <p className="font-semibold">{reviewWords.unresolved(review.unresolved)}</p>
         <label className="flex items-center gap-2 text-sm">
           {reviewWords.show}
-          <select className="field w-auto" value={onlyOpen ? 'open' : ''} onChange={({ target }) => choose({ comments: target.value })}>
+          <select
+            className="field w-auto"
+            value={onlyOpen ? 'open' : ''}
+            onChange={({ target }) => choose({ comments: target.value })}
+          >
             <option value="">{reviewWords.showAll}</option>
             <option value="open">{reviewWords.showOpen}</option>
           </select>

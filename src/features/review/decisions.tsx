@@ -38,7 +38,14 @@ function AskForm({ place }: { readonly place: Place }): JSX.Element {
     >
       <Field label={reviewWords.askNote}>
         {(parts) => (
-          <textarea {...parts} rows={2} maxLength={limits.note} className="field" value={note} onChange={({ target }) => setNote(target.value)} />
+          <textarea
+            {...parts}
+            rows={2}
+            maxLength={limits.note}
+            className="field"
+            value={note}
+            onChange={({ target }) => setNote(target.value)}
+          />
         )}
       </Field>
       <RefusalNote error={ask.error} />
@@ -62,7 +69,14 @@ function DecideForm({ place, content }: { readonly place: Place; readonly conten
     <div className="space-y-3">
       <Field label={reviewWords.decideNote}>
         {(parts) => (
-          <textarea {...parts} rows={2} maxLength={limits.note} className="field" value={note} onChange={({ target }) => setNote(target.value)} />
+          <textarea
+            {...parts}
+            rows={2}
+            maxLength={limits.note}
+            className="field"
+            value={note}
+            onChange={({ target }) => setNote(target.value)}
+          />
         )}
       </Field>
       <details>
@@ -70,17 +84,34 @@ function DecideForm({ place, content }: { readonly place: Place; readonly conten
         <div className="mt-2">
           <Field label={reviewWords.override} hint={reviewWords.overrideHint}>
             {(parts) => (
-              <input {...parts} maxLength={limits.reason} className="field" value={reason} onChange={({ target }) => setReason(target.value)} />
+              <input
+                {...parts}
+                maxLength={limits.reason}
+                className="field"
+                value={reason}
+                onChange={({ target }) => setReason(target.value)}
+              />
             )}
           </Field>
         </div>
       </details>
       <RefusalNote error={decide.error} />
       <div className="flex flex-wrap gap-3">
-        <button type="button" className="button" data-kind="main" disabled={decide.isPending} onClick={() => decide.mutate('approve')}>
+        <button
+          type="button"
+          className="button"
+          data-kind="main"
+          disabled={decide.isPending}
+          onClick={() => decide.mutate('approve')}
+        >
           {reviewWords.approve}
         </button>
-        <button type="button" className="button" disabled={decide.isPending} onClick={() => decide.mutate('ask-changes')}>
+        <button
+          type="button"
+          className="button"
+          disabled={decide.isPending}
+          onClick={() => decide.mutate('ask-changes')}
+        >
           {reviewWords.askChanges}
         </button>
       </div>
@@ -116,7 +147,9 @@ export function Decisions({
         {review.decisions.length === 0 ? <li className="text-soft">{reviewWords.noDecisions}</li> : null}
         {review.decisions.map((decision) => (
           <li key={decision.id}>
-            <StateMark state={decision.isStale ? 'stale' : decision.decision === 'approve' ? 'approved' : 'changes-asked'}>
+            <StateMark
+              state={decision.isStale ? 'stale' : decision.decision === 'approve' ? 'approved' : 'changes-asked'}
+            >
               {decision.decision === 'approve' ? reviewWords.approved : reviewWords.askedChanges}
             </StateMark>{' '}
             <span className="font-semibold">{decision.by.name}</span>{' '}
@@ -130,7 +163,11 @@ export function Decisions({
         ))}
       </ul>
       {review.asked === null && canAsk ? <AskForm place={place} /> : null}
-      {canDecide ? <DecideForm place={place} content={content} /> : <p className="text-sm text-soft">{reviewWords.mayNot}</p>}
+      {canDecide ? (
+        <DecideForm place={place} content={content} />
+      ) : (
+        <p className="text-sm text-soft">{reviewWords.mayNot}</p>
+      )}
     </div>
   )
 }

@@ -5,7 +5,12 @@ import { Dimensions, Flips, Inputs, Margins, Matings } from '../../features/comp
 import { TextChanges } from '../../features/compare/text-changes.tsx'
 import { SetNav } from '../../features/sets/set-nav.tsx'
 import { textOf } from '../../features/versions/version-head.tsx'
-import { comparisonQuery, versionQuery, versionsQuery, type VersionComparison } from '../../features/versions/version-queries.ts'
+import {
+  comparisonQuery,
+  versionQuery,
+  versionsQuery,
+  type VersionComparison,
+} from '../../features/versions/version-queries.ts'
 import { isMissing } from '../../lib/refusals.ts'
 import { useAddressFilter } from '../../lib/use-address-filter.ts'
 import { usePart } from '../../lib/use-part.ts'
@@ -30,9 +35,15 @@ function OtherChoice({ team, set, number }: Place): JSX.Element {
   return (
     <label className="flex flex-wrap items-center gap-2 text-sm font-semibold">
       {compareWords.with}
-      <select className="field w-auto max-w-full" value={chosen} onChange={({ target }) => choose({ with: target.value })}>
+      <select
+        className="field w-auto max-w-full"
+        value={chosen}
+        onChange={({ target }) => choose({ with: target.value })}
+      >
         <option value="">{compareWords.usual}</option>
-        {chosen !== '' && others.every((row) => String(row.number) !== chosen) ? <option value={chosen}>v{chosen}</option> : null}
+        {chosen !== '' && others.every((row) => String(row.number) !== chosen) ? (
+          <option value={chosen}>v{chosen}</option>
+        ) : null}
         {others.map((row) => (
           <option key={row.number} value={row.number}>
             {compareWords.versionOption(row.number, row.branch, row.label)}
@@ -43,17 +54,37 @@ function OtherChoice({ team, set, number }: Place): JSX.Element {
   )
 }
 
-function Drawings({ team, set, answer }: { readonly team: string; readonly set: string; readonly answer: VersionComparison }): ReactNode {
+function Drawings({
+  team,
+  set,
+  answer,
+}: {
+  readonly team: string
+  readonly set: string
+  readonly answer: VersionComparison
+}): ReactNode {
   const before = useQuery(versionQuery(team, set, answer.before))
   const after = useQuery(versionQuery(team, set, answer.after))
   return (
     <Loaded query={before} lines={6}>
-      {(old) => <Loaded query={after} lines={6}>{(now) => <BlankChanges before={textOf(old)} after={textOf(now)} />}</Loaded>}
+      {(old) => (
+        <Loaded query={after} lines={6}>
+          {(now) => <BlankChanges before={textOf(old)} after={textOf(now)} />}
+        </Loaded>
+      )}
     </Loaded>
   )
 }
 
-function Compared({ team, set, answer }: { readonly team: string; readonly set: string; readonly answer: VersionComparison }): JSX.Element {
+function Compared({
+  team,
+  set,
+  answer,
+}: {
+  readonly team: string
+  readonly set: string
+  readonly answer: VersionComparison
+}): JSX.Element {
   const { comparison } = answer
   return (
     <div className="space-y-5">

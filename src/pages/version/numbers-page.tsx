@@ -1,6 +1,13 @@
 import { useQuery } from '@tanstack/react-query'
 import { useState, type JSX, type ReactNode } from 'react'
-import { numberSheetQuery, numbersCsvAddress, useTick, type Measure, type NumberSheet, type Place } from '../../features/numbers/number-queries.ts'
+import {
+  numberSheetQuery,
+  numbersCsvAddress,
+  useTick,
+  type Measure,
+  type NumberSheet,
+  type Place,
+} from '../../features/numbers/number-queries.ts'
 import { NumberTable } from '../../features/numbers/number-table.tsx'
 import { QueryForm } from '../../features/numbers/query-form.tsx'
 import { SetNav } from '../../features/sets/set-nav.tsx'

@@ -43,7 +43,9 @@ function ReviewContent({ team, version }: { readonly team: string; readonly vers
       <div className="grid items-start gap-5 lg:grid-cols-[3fr_2fr]">
         <Sheet title={reviewWords.comments} id="comments">
           <Loaded query={review}>
-            {(data) => <Comments place={place} review={data} report={version.report} canComment={may('review:comment')} />}
+            {(data) => (
+              <Comments place={place} review={data} report={version.report} canComment={may('review:comment')} />
+            )}
           </Loaded>
         </Sheet>
         <div className="space-y-5">
