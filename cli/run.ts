@@ -24,6 +24,11 @@ foldgauge COMMAND --help tells a command's options. Exit codes: 0 nothing failed
 }
 
 function unknownCommand(io: Io, word: string): ExitCode {
+  if (word.startsWith('-')) {
+    io.err(`foldgauge: “${word}” stands where a command is expected\n`)
+    io.err('Write the command first, such as foldgauge check --report json.\n')
+    return exitCode.unusable
+  }
   const near = nearestName(
     word,
     commandEntries.map(({ name }) => name),
@@ -36,6 +41,7 @@ function unknownCommand(io: Io, word: string): ExitCode {
 /** Runs the command line. @returns the exit code; never throws */
 export async function run(words: readonly string[], io: Io): Promise<ExitCode> {
   const [first, ...rest] = words
+  if (first === 'help' && rest[0] !== undefined) return run([rest[0], '--help'], io)
   if (first === undefined || first === '--help' || first === '-h' || first === 'help') {
     io.out(overview())
     return exitCode.clean
@@ -62,6 +68,11 @@ function explain(io: Io, command: string, error: unknown): ExitCode {
     io.err(`foldgauge ${command}: ${error.message}\n${error.hint === null ? '' : `${error.hint}\n`}`)
     return exitCode.unusable
   }
+  return tellDefect(io, error)
+}
+
+/** Tells of something nobody foresaw in one line; where it happened only to those who ask. */
+export function tellDefect(io: Pick<Io, 'env' | 'err'>, error: unknown): ExitCode {
   const message = error instanceof Error ? error.message : String(error)
   io.err(`foldgauge: this is a defect in Foldgauge, not in your template: ${message}\n`)
   if (io.env['FOLDGAUGE_DEBUG'] === '1' && error instanceof Error) io.err(`${error.stack ?? ''}\n`)

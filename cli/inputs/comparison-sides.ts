@@ -1,5 +1,5 @@
 import { spawnSync } from 'node:child_process'
-import { existsSync, readFileSync, statSync } from 'node:fs'
+import { existsSync, statSync } from 'node:fs'
 import { dirname, join, relative, resolve } from 'node:path'
 import { globSync } from 'tinyglobby'
 import type { CheckOptions } from '../../shared/check-options.ts'
@@ -9,6 +9,7 @@ import { emptyWorkspace, readWorkspace } from '../../shared/template/read-worksp
 import { UsageError, type Io } from '../io.ts'
 import { findWorkspaceFolder, workspaceAt, workspaceFile } from './find-workspace.ts'
 import { readReports } from './read-reports.ts'
+import { readText } from './read-text.ts'
 
 type Judging = Omit<CheckOptions, 'file'>
 
@@ -42,7 +43,7 @@ function fromRevision(io: Io, word: string, revision: string, path: string, judg
 }
 
 function fromFile(io: Io, path: string, shown: string, judging: Judging): readonly Report[] {
-  const text = readFileSync(path, 'utf8')
+  const text = readText(path, shown)
   if (path.endsWith('.json')) return readReports(text, shown)
   return [checkTemplate(text, workspaceAt(dirname(path), io.cwd).workspace, { ...judging, file: shown })]
 }

@@ -1,7 +1,8 @@
-import { readFileSync, statSync } from 'node:fs'
-import { dirname, isAbsolute, join, relative, resolve } from 'node:path'
+import { statSync } from 'node:fs'
+import { basename, dirname, isAbsolute, join, relative, resolve } from 'node:path'
 import { UsageError, type Io } from '../io.ts'
 import { findWorkspaceFolder, workspaceAt, workspaceFile, type FoundWorkspace } from './find-workspace.ts'
+import { readText } from './read-text.ts'
 
 /** A set to judge: where it is, its text, and the workspace that holds for it. */
 export interface SetInput {
@@ -56,8 +57,18 @@ async function setsOfFolder(folder: string, word: string, io: Io): Promise<reado
 }
 
 async function filesOf(word: string, io: Io): Promise<readonly string[]> {
+  if (word === '')
+    throw new UsageError(
+      'a path is empty',
+      'A variable of the shell may hold nothing. Without any path the workspace here is judged.',
+    )
   const path = resolve(io.cwd, word)
   const kind = statOf(path)
+  if (kind === 'file' && basename(path) === workspaceFile)
+    throw new UsageError(
+      `${word} is a workspace, not a set`,
+      `Name a set, or judge all of its sets: foldgauge check ${relative(io.cwd, dirname(path)) || '.'}`,
+    )
   if (kind === 'file') return [path]
   if (kind === 'folder') return setsOfFolder(path, word, io)
   if (isPattern(word)) {
@@ -72,18 +83,6 @@ async function filesOf(word: string, io: Io): Promise<readonly string[]> {
     `there is no file ${word}`,
     'Name a set, a folder or a pattern such as "sets/*.yaml"; without one the workspace here is judged.',
   )
-}
-
-function readText(path: string, shown: string): string {
-  try {
-    return readFileSync(path, 'utf8')
-  } catch (error) {
-    const code = (error as NodeJS.ErrnoException).code
-    throw new UsageError(
-      `${shown} cannot be read (${code ?? 'unknown reason'})`,
-      code === 'EACCES' ? 'Give yourself permission to read it.' : null,
-    )
-  }
 }
 
 /** Paths are shown relative to where the command was called, unless they lie elsewhere or were given whole. */

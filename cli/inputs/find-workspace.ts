@@ -1,8 +1,9 @@
-import { existsSync, readFileSync } from 'node:fs'
+import { existsSync } from 'node:fs'
 import { dirname, join, relative } from 'node:path'
 import { emptyWorkspace, readWorkspace } from '../../shared/template/read-workspace.ts'
 import { rules } from '../../shared/rules/rule-registry.ts'
 import type { Workspace } from '../../shared/template/template-model.ts'
+import { readText } from './read-text.ts'
 
 const ruleNames = rules.map((rule) => rule.id)
 
@@ -36,8 +37,9 @@ export function workspaceAt(folder: string, cwd: string): FoundWorkspace {
   const file = join(home, workspaceFile)
   const known = found.get(file)
   if (known !== undefined) return known
-  const text = readFileSync(file, 'utf8')
-  const made = { workspace: readWorkspace(text, relative(cwd, file) || workspaceFile, ruleNames), folder: home, text }
+  const shown = relative(cwd, file) || workspaceFile
+  const text = readText(file, shown)
+  const made = { workspace: readWorkspace(text, shown, ruleNames), folder: home, text }
   found.set(file, made)
   return made
 }

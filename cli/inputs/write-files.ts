@@ -1,18 +1,7 @@
 import { existsSync, lstatSync, mkdirSync, renameSync, rmSync, writeFileSync } from 'node:fs'
 import { basename, join, relative, resolve } from 'node:path'
 import { UsageError } from '../io.ts'
-
-const reasons: Readonly<Record<string, string>> = {
-  EACCES: 'you may not write there',
-  EPERM: 'you may not write there',
-  EROFS: 'the folder is read-only',
-  ENOSPC: 'the disk is full',
-  EDQUOT: 'your share of the disk is used up',
-  EISDIR: 'there is a folder of that name',
-  EEXIST: 'there is a file where a folder is needed',
-  ENOTDIR: 'a part of the path is a file',
-  ENAMETOOLONG: 'the name is too long',
-}
+import { reasonOf } from './io-reasons.ts'
 
 export interface NewFile {
   readonly name: string
@@ -60,11 +49,7 @@ export function writeAll(folder: string, files: readonly NewFile[], isForced: bo
     }
   } catch (error) {
     for (const part of parts) rmSync(part, { force: true })
-    const { code = '' } = error as NodeJS.ErrnoException
-    throw new UsageError(
-      `${current} was not written: ${reasons[code] ?? (code === '' ? 'unknown reason' : code)}`,
-      'Nothing was written.',
-    )
+    throw new UsageError(`${current} was not written: ${reasonOf(error)}`, 'Nothing was written.')
   }
   files.forEach(({ name }, index) => {
     const part = parts[index]
