@@ -33,6 +33,8 @@ interface Options extends JudgingOptions {
   readonly watch?: boolean
 }
 
+const usualColumns = 80
+
 const collect = (value: string, before: readonly string[]): readonly string[] => [...before, value]
 
 /** `97%`, `97 %` or `0.97`: a print scale between a half and double. */
@@ -134,17 +136,23 @@ function present(
   presentation: Presentation,
 ): Promise<void> {
   return request.load().then((reporter) => {
-    const text = reporter(reports, presentation)
-    if (request.file === null) io.out(text)
-    else writeWhole(resolve(io.cwd, request.file), text)
+    if (request.file === null) io.out(reporter(reports, presentation))
+    else writeWhole(resolve(io.cwd, request.file), reporter(reports, awayFromTerminal(presentation)))
   })
 }
+
+/** The same for a file or another stream, which has no colours and no width of its own. */
+const awayFromTerminal = (presentation: Presentation): Presentation => ({
+  ...presentation,
+  columns: usualColumns,
+  hasColour: false,
+})
 
 export function presentationOf(io: Io, units: RulerUnit | null, isSingle: boolean): Presentation {
   return {
     units,
     isSingle,
-    columns: io.terminal.columns ?? 80,
+    columns: io.terminal.columns ?? usualColumns,
     hasColour: io.terminal.isTerminal && !io.env['NO_COLOR'] && io.env['TERM'] !== 'dumb',
   }
 }
@@ -165,7 +173,7 @@ const usages: readonly OptionUsage[] = [
     about: 'what makes the exit code 1: fail, warn, or with --against only regression',
     initial: 'fail',
   },
-  { flags: '--units <unit>', about: 'lengths in mm or in (default: the units of each set)' },
+  { flags: '--units <unit>', about: 'figures in mm or in (default: the units of each set; sentences keep those)' },
   { flags: '--fixes', about: 'work out the smallest change that passes (text always does)' },
   { flags: '--fix', about: 'apply the smallest changes that pass to the files' },
   { flags: '--watch', about: 'judge again after every save' },
@@ -200,6 +208,7 @@ export const checkCommand: CommandModule = {
     }
     const judging = judgingOptions(io, options)
     const isText = requests.some((request) => request.name === 'text')
+    const isTextShown = requests.some((request) => request.name === 'text' && request.file === null)
     const presentation = presentationOf(io, units, options.single === true)
     const round = async (): Promise<ExitCode> => {
       const found = await findSets(words, io)
@@ -212,7 +221,13 @@ export const checkCommand: CommandModule = {
       for (const request of requests) await present(io, request, reports, presentation)
       return options.against === undefined
         ? exitOf(reports, failOn === 'warn' ? 'warn' : 'fail')
-        : exitAgainst(io, options.against, reports, { judging, failOn, isText, presentation })
+        : exitAgainst(io, options.against, reports, {
+            // Judged as far as what it is compared with, or windows of scales would look new.
+            judging: { ...judging, scales: asked.scales },
+            failOn,
+            isTextShown,
+            presentation,
+          })
     }
     if (options.watch !== true) return round()
     const { watchSets } = await import('./check-watch.ts')
@@ -225,7 +240,7 @@ export const checkCommand: CommandModule = {
 interface AgainstOptions {
   readonly judging: Omit<CheckOptions, 'file'>
   readonly failOn: 'fail' | 'warn' | 'regression'
-  readonly isText: boolean
+  readonly isTextShown: boolean
   readonly presentation: Presentation
 }
 
@@ -239,9 +254,8 @@ async function exitAgainst(
   const { againstText, gotWorse, holdAgainst, isTold } = await import('./check-against.ts')
   const against = await holdAgainst(io, word, reports, options.judging)
   // Standard output carries the report; beside a report for programs the comparison goes to standard error.
-  const text = againstText(against, word, options.presentation)
-  if (options.isText) io.out(text)
-  else io.err(text)
+  if (options.isTextShown) io.out(againstText(against, word, options.presentation))
+  else io.err(againstText(against, word, awayFromTerminal(options.presentation)))
   if (options.failOn !== 'regression') return exitOf(reports, options.failOn)
   const unusable = exitOf(reports, 'fail')
   if (unusable === exitCode.unusable || unusable === exitCode.defect) return unusable

@@ -5,7 +5,7 @@ import { rules } from '../../shared/rules/rule-registry.ts'
 import { nearestName } from '../../shared/units/did-you-mean.ts'
 import { exitCode } from '../exit-code.ts'
 import { UsageError } from '../io.ts'
-import { wrapText } from '../reporters/text.ts'
+import { wrapText } from '../reporters/wrap-text.ts'
 import type { CommandModule } from './command-module.ts'
 
 const defaultsTable = (): string =>

@@ -3,7 +3,7 @@ import { formatLength, formatRange } from '../../shared/units/format-length.ts'
 import { escapeMarkdown } from './markdown.ts'
 import { paintFor, printable, type Paint } from './paint.ts'
 import type { Presentation } from './reporter.ts'
-import { wrapText } from './text.ts'
+import { wrapText } from './wrap-text.ts'
 
 /** Sets that stand on one side only. */
 export interface LoneSets {

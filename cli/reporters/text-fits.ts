@@ -1,19 +1,26 @@
 import { hundredBuilds } from '../../shared/report/hundred-builds.ts'
 import type { AxisReport, FitReport } from '../../shared/report/report.ts'
 import { sourceInWords } from '../../shared/report/source-words.ts'
-import { formatLength, formatRange } from '../../shared/units/format-length.ts'
+import { formatRange } from '../../shared/units/format-length.ts'
 import type { RulerUnit } from '../../shared/units/units.ts'
 import type { Paint } from './paint.ts'
+import { axisIndent, axisNameWidth, besideFigures, clearanceText, type Layout } from './text-layout.ts'
+import { wrapText } from './wrap-text.ts'
 
-/** A hundred builds as tally marks: x binds, | goes, o rattles; in tens, a mark for two builds where it is narrow. */
-export function tally(axis: Pick<AxisReport, 'binds' | 'rattles'>, columns: number): string {
-  const perMark = columns >= 150 ? 1 : columns >= 96 ? 2 : 4
+/**
+ * A hundred builds as tally marks in tens: x binds, | goes, o rattles. However many builds a mark stands for, none of
+ * the three is rounded away while there is room for it.
+ */
+export function tally(axis: Pick<AxisReport, 'binds' | 'rattles'>, perMark: number): string {
   const builds = hundredBuilds(axis.binds, axis.rattles)
   const marks = 100 / perMark
   const some = (share: number): number => (share === 0 ? 0 : Math.max(1, Math.round(share / perMark)))
-  const binds = Math.min(marks, some(builds.binds))
-  const rattles = Math.min(marks - binds, some(builds.rattles))
-  const all = 'x'.repeat(binds) + '|'.repeat(marks - binds - rattles) + 'o'.repeat(rattles)
+  const held = builds.goes > 0 ? 1 : 0
+  const rattles = Math.min(some(builds.rattles), marks - held - (builds.binds > 0 ? 1 : 0))
+  const binds = Math.min(some(builds.binds), marks - held - rattles)
+  const goes = builds.goes > 0 ? marks - binds - rattles : 0
+  // Where nothing goes the two others share what rounding left.
+  const all = 'x'.repeat(goes > 0 ? binds : marks - rattles) + '|'.repeat(goes) + 'o'.repeat(rattles)
   return (all.match(/.{1,10}/g) ?? []).join(' ')
 }
 
@@ -23,18 +30,22 @@ const marks = { pass: 'ok', warn: 'warn', fail: 'FAIL' } as const
 const colourOf = (paint: Paint, verdict: 'pass' | 'warn' | 'fail'): ((text: string) => string) =>
   verdict === 'pass' ? paint.good : verdict === 'warn' ? paint.wary : paint.bad
 
-const lengthIn = (mm: number, units: RulerUnit): string => formatLength(mm, units, { decimals: units === 'mm' ? 2 : 3 })
+const under = ' '.repeat(axisIndent)
 
-function axisLine(axis: AxisReport, units: RulerUnit, columns: number, paint: Paint): string {
-  const figures = `${axis.axis.padEnd(10)}${lengthIn(axis.clearance.nominal, units).padStart(10)}  ${paint.quiet(`wants ${formatRange(axis.required, units)}`.padEnd(20))}`
-  return `         ${figures}  ${paintTally(tally(axis, columns), paint)}`
+function axisLine(axis: AxisReport, layout: Layout, paint: Paint): string {
+  const { units, clearanceWidth, requiredWidth, perMark } = layout
+  const name = axis.axis.padEnd(axisNameWidth)
+  const has = clearanceText(axis, units).padStart(clearanceWidth)
+  const wants = paint.quiet(`wants ${formatRange(axis.required, units).padEnd(requiredWidth)}`)
+  return `${under}${name}${has}  ${wants}  ${paintTally(tally(axis, perMark), paint)}`
 }
 
 /** What varies most on an axis that does not pass, in words. */
-function spreadLine(axis: AxisReport): string | null {
+function spreadLines(axis: AxisReport, layout: Layout): readonly string[] {
   const [first] = axis.sources
-  if (axis.verdict === 'pass' || first === undefined) return null
-  return `                   most of its spread: ${sourceInWords(first.name)} (${String(Math.round(first.share * 100))} %)`
+  if (axis.verdict === 'pass' || first === undefined) return []
+  const text = `most of its spread: ${sourceInWords(first.name)} (${String(Math.round(first.share * 100))}\u00a0%)`
+  return wrapText(text, layout.width, ' '.repeat(axisIndent + 4))
 }
 
 const outOfHundred = (share: number): string => {
@@ -48,7 +59,7 @@ const putInWords = (fit: FitReport): string => {
 }
 
 function asides(fit: FitReport, units: RulerUnit): readonly string[] {
-  const length = (mm: number): string => lengthIn(mm, units)
+  const length = (mm: number): string => besideFigures(mm, units)
   return [
     ...(fit.pack === null || fit.pack.max - fit.pack.min < 0.5
       ? []
@@ -75,18 +86,21 @@ function asides(fit: FitReport, units: RulerUnit): readonly string[] {
   ]
 }
 
+/** The fit's verdict, name and parts; what does not fit into the line goes into the next. */
+function headLines(fit: FitReport, layout: Layout, paint: Paint): readonly string[] {
+  const mark = colourOf(paint, fit.verdict)(marks[fit.verdict].padEnd(axisIndent - 4))
+  const [words, closes] = [putInWords(fit), `${outOfHundred(fit.closes)} of 100 close`]
+  const head = `  ${mark}  ${paint.bold(fit.id)}`
+  return axisIndent + `${fit.id}  ${words}  ${closes}`.length <= layout.width
+    ? [`${head}  ${words}  ${paint.quiet(closes)}`]
+    : [head, ...wrapText(`${words}, ${closes}`, layout.width, under)]
+}
+
 /** A fit with its clearances, a hundred builds of each, and what varies most where it does not pass. */
-export function fitLines(fit: FitReport, units: RulerUnit, columns: number, paint: Paint): readonly string[] {
-  const mark = colourOf(paint, fit.verdict)(marks[fit.verdict].padEnd(5))
-  const closes = `${outOfHundred(fit.closes)} of 100 close`
+export function fitLines(fit: FitReport, layout: Layout, paint: Paint): readonly string[] {
   return [
-    `  ${mark}  ${paint.bold(fit.id)}  ${putInWords(fit)}  ${paint.quiet(closes)}`,
-    ...fit.axes.flatMap((axis) => {
-      const spread = spreadLine(axis)
-      return spread === null
-        ? [axisLine(axis, units, columns, paint)]
-        : [axisLine(axis, units, columns, paint), paint.quiet(spread)]
-    }),
-    ...asides(fit, units).map((aside) => paint.quiet(`         ${aside}`)),
+    ...headLines(fit, layout, paint),
+    ...fit.axes.flatMap((axis) => [axisLine(axis, layout, paint), ...spreadLines(axis, layout).map(paint.quiet)]),
+    ...asides(fit, layout.units).flatMap((aside) => wrapText(aside, layout.width, under).map(paint.quiet)),
   ]
 }

@@ -2,19 +2,8 @@ import type { Report, Verdict } from '../../shared/report/report.ts'
 import { paintFor, printable, type Paint } from './paint.ts'
 import type { Presentation, Reporter } from './reporter.ts'
 import { fitLines } from './text-fits.ts'
-
-/** Breaks words at a width, later lines indented. */
-export function wrapText(text: string, width: number, indent: string): readonly string[] {
-  const lines: string[] = []
-  let line = ''
-  for (const word of text.split(' ')) {
-    if (line !== '' && line.length + 1 + word.length > width - indent.length) {
-      lines.push(indent + line)
-      line = word
-    } else line = line === '' ? word : `${line} ${word}`
-  }
-  return line === '' ? lines : [...lines, indent + line]
-}
+import { layoutOf, type Layout } from './text-layout.ts'
+import { wrapText } from './wrap-text.ts'
 
 const placeOf = (at: Verdict['at']): string => `${printable(at.file)}:${String(at.line)}:${String(at.column)}:`
 
@@ -41,10 +30,8 @@ function verdictLines(verdict: Verdict, width: number, paint: Paint): readonly s
   ]
   if (verdict.waiver !== null)
     lines.push(
-      ...wrapText(
-        paint.quiet(`waived until ${verdict.waiver.until}: ${printable(verdict.waiver.reason)}`),
-        width,
-        '  ',
+      ...wrapText(`waived until ${verdict.waiver.until}: ${printable(verdict.waiver.reason)}`, width, '  ').map(
+        paint.quiet,
       ),
     )
   if (verdict.fix !== null)
@@ -62,7 +49,8 @@ const inOrder: readonly Verdict['status'][] = ['info', 'waived', 'warn', 'fail',
 
 const plural = (count: number, one: string): string => `${String(count)} ${one}`
 
-function summaryLine(report: Report, paint: Paint): string {
+/** The share of sets that go together, and last of all the verdict. */
+function summaryLines(report: Report, width: number, paint: Paint): readonly string[] {
   const { summary } = report
   const counts = [
     ...(summary.crashed > 0 ? [plural(summary.crashed, 'could not be finished')] : []),
@@ -78,7 +66,10 @@ function summaryLine(report: Report, paint: Paint): string {
       : summary.verdict === 'warn'
         ? { word: 'PASSES WITH WARNINGS', colour: paint.wary }
         : { word: 'PASSES', colour: paint.good }
-  return `${colour(paint.bold(word))} ${paint.bold(printable(report.set))}: ${counts}. ${worksSentence(report)}`
+  return [
+    ...wrapText(worksSentence(report), width, ''),
+    `${colour(paint.bold(word))} ${paint.bold(printable(report.set))}: ${counts}.`,
+  ]
 }
 
 /** Half-widths are guesses, so the share is told in twentieths. */
@@ -91,7 +82,11 @@ export function worksSentence(report: Report): string {
   return `About ${String(twentieths)} in 20 ${makers} sets go together.`
 }
 
-function heading(report: Report, paint: Paint): readonly string[] {
+/** What the marks of the picture mean. */
+const legend = (perMark: number): string =>
+  `${perMark === 1 ? 'a build' : `${String(perMark)} builds`} a mark: x binds, | goes, o rattles`
+
+function heading(report: Report, layout: Layout, paint: Paint): readonly string[] {
   const judged = [
     `${report.workmanship} makers`,
     ...(report.paper === null ? [] : [`all cut from ${report.paper}`]),
@@ -100,7 +95,7 @@ function heading(report: Report, paint: Paint): readonly string[] {
   ].join(', ')
   return [
     `${paint.bold(printable(report.title))}  ${paint.quiet(printable(report.file))}`,
-    paint.quiet(`for ${judged}; x binds, | goes, o rattles`),
+    ...wrapText(`for ${judged}; ${legend(layout.perMark)}`, layout.width, '').map(paint.quiet),
   ]
 }
 
@@ -117,30 +112,28 @@ function invalidLines(report: Report, width: number, paint: Paint): readonly str
 }
 
 function reportLines(report: Report, presentation: Presentation, paint: Paint): readonly string[] {
-  const width = Math.min(110, Math.max(60, presentation.columns))
+  const layout = layoutOf(report, presentation)
+  const { width } = layout
   if (report.summary.verdict === 'invalid') return invalidLines(report, width, paint)
-  const units = presentation.units ?? report.units
   const unchecked = report.verdicts.filter((verdict) => verdict.status === 'unchecked')
   const told = report.verdicts
     .filter((verdict) => verdict.status !== 'pass' && verdict.status !== 'unchecked')
     .toSorted((a, b) => inOrder.indexOf(a.status) - inOrder.indexOf(b.status))
   return [
-    ...heading(report, paint),
+    ...heading(report, layout, paint),
     '',
-    ...report.fits.flatMap((fit) => fitLines(fit, units, presentation.columns, paint)),
+    ...report.fits.flatMap((fit) => fitLines(fit, layout, paint)),
     '',
     ...(unchecked.length === 0
       ? []
       : wrapText(
-          paint.quiet(
-            `not checked: ${unchecked.map((verdict) => printable(`${verdict.rule} of ${verdict.subject}`)).join(', ')}`,
-          ),
+          `not checked: ${unchecked.map((verdict) => printable(`${verdict.rule} of ${verdict.subject}`)).join(', ')}`,
           width,
           '  ',
-        )),
+        ).map(paint.quiet)),
     ...told.flatMap((verdict) => verdictLines(verdict, width, paint)),
     ...(told.length + unchecked.length > 0 ? [''] : []),
-    summaryLine(report, paint),
+    ...summaryLines(report, width, paint),
   ]
 }
 

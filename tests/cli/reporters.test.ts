@@ -7,7 +7,10 @@ import { junitReporter } from '../../cli/reporters/junit.ts'
 import { markdownReporter } from '../../cli/reporters/markdown.ts'
 import type { Presentation } from '../../cli/reporters/reporter.ts'
 import { sarifReporter } from '../../cli/reporters/sarif.ts'
+import { tally } from '../../cli/reporters/text-fits.ts'
+import { clearanceText, pictureWidth } from '../../cli/reporters/text-layout.ts'
 import { textReporter } from '../../cli/reporters/text.ts'
+import { hundredBuilds } from '../../shared/report/hundred-builds.ts'
 import type { Report, Verdict } from '../../shared/report/report.ts'
 import { boxedNotes } from '../support/boxed-notes.ts'
 import { checkText } from '../support/check-text.ts'
@@ -174,7 +177,6 @@ describe('the text an author reads', () => {
   it('shows no control character of anyone else', () => {
     fc.assert(
       fc.property(texts, (text) => {
-        // eslint-disable-next-line @typescript-eslint/no-misused-spread
         for (const character of textReporter([withText(text)], presentation))
           expect(
             character === '\n' || (character >= ' ' && !/[\u007f-\u009f\u202a-\u202e\u2066-\u2069]/.test(character)),
@@ -184,20 +186,77 @@ describe('the text an author reads', () => {
     )
   })
 
-  it('fits narrow terminals', () => {
-    for (const columns of [60, 80, 120, 200]) {
-      const longest = Math.max(
-        ...textReporter([failing], { ...presentation, columns })
-          .split('\n')
-          .map((line) => line.length),
-      )
-      expect(longest).toBeLessThanOrEqual(Math.max(columns, 120) + 40)
+  it.each([64, 80, 120, 200])('keeps within a terminal of %i columns, but for the places it names', (columns) => {
+    for (const units of ['mm', 'in'] as const) {
+      const lines = textReporter([failing], { ...presentation, columns, units }).split('\n')
+      expect(lines.filter((line) => line.length > columns && !line.startsWith(`${failing.file}:`))).toEqual([])
+    }
+  })
+
+  it.each([60, 80, 120, 200])('sets figures and pictures under one another in %i columns', (columns) => {
+    for (const units of ['mm', 'in'] as const) {
+      const rows = textReporter([failing], { ...presentation, columns, units })
+        .split('\n')
+        .filter((line) => line.includes(' wants '))
+      expect(rows.length).toBe(failing.fits.flatMap((fit) => fit.axes).length)
+      expect(new Set(rows.map((row) => row.indexOf(' wants '))).size).toBe(1)
+      expect(new Set(rows.map((row) => row.length)).size).toBe(1)
     }
   })
 
   it('says the verdict last', () => {
     const lines = textReporter([failing], presentation).trimEnd().split('\n')
-    expect(lines.at(-1)).toContain('FAILS boxed-notes')
+    expect(lines.at(-1)).toMatch(/^FAILS boxed-notes: .*\.$/)
+  })
+
+  it('has no colour that is the only sign of anything', () => {
+    const painted = textReporter([failing], { ...presentation, hasColour: true })
+    expect(painted.replaceAll(/\u001b\[\d+m/g, '')).toBe(textReporter([failing], presentation))
+    expect(painted).not.toBe(textReporter([failing], presentation))
+  })
+})
+
+describe('the picture of a hundred builds', () => {
+  const shares = fc.tuple(fc.double({ min: 0, max: 1, noNaN: true }), fc.double({ min: 0, max: 1, noNaN: true }))
+
+  it('has a mark for each so many builds and leaves out nothing that happens', () => {
+    fc.assert(
+      fc.property(shares, fc.constantFrom(1, 2, 4, 5, 10), ([one, other], perMark) => {
+        const [binds, rattles] = [one, other * (1 - one)]
+        const picture = tally({ binds, rattles }, perMark)
+        expect(picture.length).toBe(pictureWidth(perMark))
+        const builds = hundredBuilds(binds, rattles)
+        const count = (mark: string): number => picture.split(mark).length - 1
+        expect(count('x') + count('|') + count('o')).toBe(100 / perMark)
+        for (const [mark, share] of [
+          ['x', builds.binds],
+          ['|', builds.goes],
+          ['o', builds.rattles],
+        ] as const) {
+          expect(count(mark) > 0).toBe(share > 0)
+          if (perMark === 1) expect(count(mark)).toBe(share)
+        }
+      }),
+    )
+  })
+})
+
+describe('a clearance beside its requirement', () => {
+  const axis = (nominal: number, min: number) => ({
+    clearance: { nominal, min: nominal, max: nominal, sigma: 0, sources: [] },
+    required: { min, max: null },
+  })
+
+  it('lines up its decimals', () => {
+    expect(clearanceText(axis(7.8, 0.5), 'mm')).toBe('7.80 mm')
+    expect(clearanceText(axis(25.4, 0.5), 'in')).toBe('1.000 in')
+    expect(clearanceText(axis(-0.0004, 0.5), 'mm')).toBe('0.00 mm')
+  })
+
+  it('shows more of them where it would look like a bound that it misses', () => {
+    expect(clearanceText(axis(0.1987, 0.2), 'mm')).toBe('0.199 mm')
+    expect(clearanceText(axis(0.19999, 0.2), 'mm')).toBe('0.199990 mm')
+    expect(clearanceText(axis(0.2, 0.2), 'mm')).toBe('0.20 mm')
   })
 })
 

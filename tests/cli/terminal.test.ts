@@ -58,6 +58,20 @@ describe('on a terminal', () => {
     expect(text).not.toContain(escape)
   })
 
+  it('writes no colour into files', () => {
+    onTerminal(`${check} --report text=kept.txt --report json`, one)
+    const kept = readFileSync(join(one, 'kept.txt'), 'utf8')
+    expect(kept).toContain('PASSES')
+    expect(kept).not.toContain(escape)
+  })
+
+  it.each([80, 120])('keeps within %i columns', (columns) => {
+    const { text } = onTerminal(`stty cols ${String(columns)}; ${check}`, one, { NO_COLOR: '1' })
+    const widths = text.split(/\r?\n/).map((line) => (line.startsWith('set-0.yaml:') ? 0 : line.length))
+    expect(Math.max(...widths)).toBeLessThanOrEqual(columns)
+    expect(Math.max(...widths)).toBeGreaterThan(columns - 30)
+  })
+
   it('counts sets while many are checked, and not through a pipe', () => {
     const many = folderOf('many', 25)
     const all = `${process.execPath} ${binary} check .`
