@@ -28,7 +28,6 @@ export default tseslint.config(
         URL: 'readonly',
         setTimeout: 'readonly',
         clearTimeout: 'readonly',
-        clearTimeout: 'readonly',
         Buffer: 'readonly',
       },
     },

@@ -37,9 +37,10 @@ export function installDebianPackages(wanted) {
   const missing = wanted.filter(({ files }) => !files.some((file) => existsSync(file)))
   if (missing.length === 0) return
   const names = missing.map(({ name }) => name)
-  if (!has('apt-get') || (!isRoot() && !has('sudo'))) {
+  const mayInstall = isRoot() || (has('sudo') && spawnSync('sudo', ['-n', 'true'], { stdio: 'ignore' }).status === 0)
+  if (!has('apt-get') || !mayInstall) {
     console.error(
-      `These programs are missing: ${names.join(', ')}. Install them (as root: apt-get install ${names.join(' ')}) and start again.`,
+      `These programs are missing: ${names.join(', ')}. Install them (with Debian, as root: apt-get install ${names.join(' ')}) and start again.`,
     )
     process.exit(2)
   }

@@ -7,8 +7,11 @@ import { installNodePackages } from './node-packages.mjs'
 import { installDebianPackages, requireNode, root, runStep } from './steps.mjs'
 
 requireNode()
-// Other people's programs that read back what is exported, and the browser that pages are looked at in.
+// Revisions to compare with, a pseudo-terminal, other people's programs that read back what is exported, and the browser
+// that pages are looked at in.
 installDebianPackages([
+  { name: 'git', files: ['/usr/bin/git', '/usr/local/bin/git'] },
+  { name: 'bsdutils', files: ['/usr/bin/script'] },
   { name: 'qpdf', files: ['/usr/bin/qpdf'] },
   { name: 'poppler-utils', files: ['/usr/bin/pdftoppm'] },
   { name: 'chromium', files: ['/usr/bin/chromium'] },
