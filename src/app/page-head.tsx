@@ -1,6 +1,6 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query'
 import type { JSX, ReactNode } from 'react'
-import { Link, NavLink, useNavigate } from 'react-router-dom'
+import { Link, NavLink, useLocation, useNavigate } from 'react-router-dom'
 import { accountEndpoints } from '../../shared/api/account-endpoints.ts'
 import { meQuery, type Me } from '../features/session/session-queries.ts'
 import { call } from '../lib/api.ts'
@@ -16,7 +16,8 @@ const tab = ({ isActive }: { readonly isActive: boolean }): string =>
 export interface Place {
   readonly to: string
   readonly name: string
-  readonly isExact?: boolean
+  /** Further addresses that belong to the place. */
+  readonly also?: RegExp
 }
 
 /** Links to places as the tabs of a folder; the one that is open is underlined like a cut. */
@@ -27,16 +28,24 @@ export function PlaceNav({
   readonly label: string
   readonly places: readonly Place[]
 }): JSX.Element {
+  const { pathname } = useLocation()
   return (
     <nav aria-label={label} className="min-w-0">
       <ul className="flex flex-wrap gap-x-5">
-        {places.map(({ to, name, isExact }) => (
-          <li key={to}>
-            <NavLink to={to} end={isExact === true} className={tab}>
-              {name}
-            </NavLink>
-          </li>
-        ))}
+        {places.map(({ to, name, also }) => {
+          const isOpen = also?.test(pathname) === true
+          return (
+            <li key={to}>
+              <NavLink
+                to={to}
+                className={({ isActive }) => tab({ isActive: isActive || isOpen })}
+                {...(isOpen ? { 'aria-current': 'page' } : {})}
+              >
+                {name}
+              </NavLink>
+            </li>
+          )
+        })}
       </ul>
     </nav>
   )

@@ -10,6 +10,9 @@ import { PageHead, PlaceNav } from './page-head.tsx'
 import { paths } from './paths.ts'
 import { SessionWatch } from './session-watch.tsx'
 
+const teamParts = /^\/teams\/[^/]+\/(team|papers|tokens|notices|webhooks|audit|settings)$/
+const setParts = /^\/teams\/[^/]+\/(sets|holds|upload)/
+
 function Places({ team, canRead }: { readonly team: string | undefined; readonly canRead: boolean }): JSX.Element {
   const { nav } = commonWords
   const own = { to: paths.myBuilds, name: nav.builds }
@@ -17,9 +20,9 @@ function Places({ team, canRead }: { readonly team: string | undefined; readonly
     team === undefined || !canRead
       ? [own]
       : [
-          { to: paths.sets(team), name: nav.sets },
+          { to: paths.sets(team), name: nav.sets, also: setParts },
           { to: paths.tryIt(team), name: nav.tryIt },
-          { to: paths.team(team), name: nav.team },
+          { to: paths.team(team), name: nav.team, also: teamParts },
           own,
         ]
   return <PlaceNav label={commonWords.places} places={places} />

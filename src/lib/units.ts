@@ -1,5 +1,6 @@
 import { formatLength, formatMark, millimetresPerInch } from '../../shared/units/format-length.ts'
 import type { RulerUnit } from '../../shared/units/units.ts'
+import { unitWords } from '../words/unit-words.ts'
 import { store, useStored } from './stored.ts'
 
 const key = 'foldgauge-units'
@@ -11,7 +12,13 @@ export const chooseUnits = (units: RulerUnit): void => store(key, units)
 
 /** A computed length: hundredths of a millimetre, thousandths of an inch. */
 export const lengthIn = (mm: number, units: RulerUnit): string =>
-  units === 'mm' ? formatLength(mm, 'mm', { decimals: 2 }) : `${(mm / millimetresPerInch).toFixed(3)} in`
+  (units === 'mm' ? formatLength(mm, 'mm', { decimals: 2 }) : `${(mm / millimetresPerInch).toFixed(3)} in`).replace(
+    '-',
+    '−',
+  )
+
+/** The same without its unit. */
+export const bareIn = (mm: number, units: RulerUnit): string => lengthIn(mm, units).replace(/ (mm|in)$/, '')
 
 /** A length that somebody marks, on the mark nearest to it. */
 export const markIn = (mm: number, units: RulerUnit): string =>
@@ -21,9 +28,11 @@ export const markIn = (mm: number, units: RulerUnit): string =>
 export const signedIn = (mm: number, units: RulerUnit): string =>
   `${mm > 0 ? '+' : mm < 0 ? '−' : ''}${lengthIn(Math.abs(mm), units)}`
 
+/** A band of lengths in words: `0.2 to 3 mm`, `10 mm or more`. */
 export function bandIn(band: { readonly min: number | null; readonly max: number | null }, units: RulerUnit): string {
-  const end = (value: number | null): string => (value === null ? '' : lengthIn(value, units).replace(/ (mm|in)$/, ''))
-  return `${end(band.min)}…${end(band.max)} ${units}`
+  if (band.min === null) return band.max === null ? unitWords.any : unitWords.upTo(lengthIn(band.max, units))
+  if (band.max === null) return unitWords.from(lengthIn(band.min, units))
+  return unitWords.between(bareIn(band.min, units), lengthIn(band.max, units))
 }
 
 /** What somebody typed in the chosen units as millimetres; null where it is no length. Fractions and either decimal mark. */

@@ -2,17 +2,19 @@ import type { JSX } from 'react'
 import { hundredBuilds } from '../../shared/report/hundred-builds.ts'
 import { stripWords } from '../words/strip-words.ts'
 
-const pitch = 4
-const height = 20
+const pitch = 6
+const perRow = 50
+const rowHeight = 21
 
 /** Binds stand high, a build that goes is a plain stroke through the middle, what rattles lies low as a ring. */
 function mark(index: number, binds: number, rattles: number): JSX.Element {
-  const x = index * pitch + pitch / 2
+  const x = (index % perRow) * pitch + pitch / 2
+  const y = Math.floor(index / perRow) * rowHeight
   if (index < binds)
-    return <path key={index} d={`M${String(x)} 0v9m-1.6 0h3.2`} stroke="var(--fail)" strokeWidth="1.8" />
+    return <path key={index} d={`M${String(x)} ${String(y + 1)}v9m-2.2 0h4.4`} stroke="var(--fail)" strokeWidth="2" />
   if (index >= 100 - rattles)
-    return <circle key={index} cx={x} cy={16.5} r={1.6} fill="var(--sheet)" stroke="var(--warn)" strokeWidth="1.2" />
-  return <path key={index} d={`M${String(x)} 6v8`} stroke="var(--ink)" strokeWidth="1.2" />
+    return <circle key={index} cx={x} cy={y + 16.5} r={2} fill="var(--sheet)" stroke="var(--warn)" strokeWidth="1.3" />
+  return <path key={index} d={`M${String(x)} ${String(y + 6)}v8`} stroke="var(--ink)" strokeWidth="1.4" />
 }
 
 /** A hundred builds of one fit: how many bind, go and rattle, told by place and shape, with the number beside it. */
@@ -27,14 +29,17 @@ export function HundredStrip({
 }): JSX.Element {
   const counts = hundredBuilds(binds, rattles)
   return (
-    <span className={`inline-flex max-w-full items-center gap-2 ${isCompact ? 'w-56' : 'w-full max-w-xl'}`}>
+    <span className={`inline-flex max-w-full items-center gap-2 ${isCompact ? 'w-56' : 'w-full max-w-md'}`}>
       <svg
-        viewBox={`0 0 ${String(100 * pitch)} ${String(height)}`}
+        viewBox={`0 0 ${String(perRow * pitch)} ${String(2 * rowHeight)}`}
         className="min-w-0 flex-1"
         role="img"
         aria-label={stripWords.sentence(counts.binds, counts.goes, counts.rattles)}
       >
-        <path d={`M0 10h${String(100 * pitch)}`} stroke="var(--hair)" />
+        <path
+          d={`M0 10h${String(perRow * pitch)}M0 ${String(rowHeight + 10)}h${String(perRow * pitch)}`}
+          stroke="var(--hair)"
+        />
         {Array.from({ length: 100 }, (_, index) => mark(index, counts.binds, counts.rattles))}
       </svg>
       <span className="figure shrink-0 text-sm" aria-hidden="true">

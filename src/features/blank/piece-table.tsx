@@ -1,6 +1,6 @@
 import type { JSX } from 'react'
 import type { PieceReport, Quantity } from '../../../shared/report/report.ts'
-import { lengthIn, markIn, useUnits } from '../../lib/units.ts'
+import { bareIn, lengthIn, markIn, useUnits } from '../../lib/units.ts'
 import { DataTable } from '../../ui/data-table.tsx'
 import { blankWords } from '../../words/blank-words.ts'
 
@@ -21,6 +21,8 @@ interface Mark {
 const isQuantity = (value: unknown): value is Quantity =>
   typeof value === 'object' && value !== null && 'nominal' in value
 
+const axes = ['length', 'width', 'depth', 'height'] as const
+
 function rowsOf(piece: PieceReport): readonly Row[] {
   const marks = Array.isArray(piece['measures']) ? (piece['measures'] as readonly Mark[]) : []
   const sides = [
@@ -36,8 +38,9 @@ function rowsOf(piece: PieceReport): readonly Row[] {
       range: null,
     })),
     ...sides.flatMap(([side, sizes]) =>
-      Object.entries(sizes ?? {}).flatMap(([axis, size]) =>
-        isQuantity(size)
+      axes.flatMap((axis) => {
+        const size: unknown = sizes === null ? undefined : (sizes as Readonly<Record<string, unknown>>)[axis]
+        return isQuantity(size)
           ? [
               {
                 name: `${side} ${axis}`,
@@ -47,8 +50,8 @@ function rowsOf(piece: PieceReport): readonly Row[] {
                 range: [size.min, size.max] as const,
               },
             ]
-          : [],
-      ),
+          : []
+      }),
     ),
   ]
 }
@@ -87,9 +90,7 @@ export function PieceTable({
             isFigure: true,
             isExtra: true,
             cell: (row) =>
-              row.range === null
-                ? row.note
-                : `${lengthIn(row.range[0], units).replace(/ (mm|in)$/, '')}…${lengthIn(row.range[1], units)}`,
+              row.range === null ? row.note : `${bareIn(row.range[0], units)}…${lengthIn(row.range[1], units)}`,
           },
         ]}
       />

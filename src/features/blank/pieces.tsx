@@ -6,6 +6,7 @@ import { Loaded, Waiting } from '../../ui/loaded.tsx'
 import { blankWords } from '../../words/blank-words.ts'
 import { blanksQuery, type VersionText } from '../engine/engine-queries.ts'
 import { PieceTable } from './piece-table.tsx'
+import { piecesInOrder } from './pieces-in-order.ts'
 
 const BlankDrawing = lazy(() => import('./blank-drawing.tsx'))
 
@@ -64,7 +65,7 @@ export function Pieces({
   return (
     <div className="space-y-8">
       <p className="label">{blankWords.legend}</p>
-      {Object.entries(report.pieces).map(([name, piece]) => {
+      {piecesInOrder(report, version.text).map(([name, piece]) => {
         const tableId = `${id}-${name}`
         return (
           <section key={name} id={`piece-${name}`} aria-label={name}>

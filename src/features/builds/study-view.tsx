@@ -1,7 +1,7 @@
 import { useQuery } from '@tanstack/react-query'
 import type { JSX, ReactNode } from 'react'
 import { feels } from '../../../shared/api/shapes/build-shapes.ts'
-import { lengthIn, signedIn, useUnits } from '../../lib/units.ts'
+import { bareIn, lengthIn, signedIn, useUnits } from '../../lib/units.ts'
 import { DataTable } from '../../ui/data-table.tsx'
 import { Empty, Loaded } from '../../ui/loaded.tsx'
 import { Sheet } from '../../ui/sheet.tsx'
@@ -20,7 +20,7 @@ const marks: Readonly<Record<Study['dimensions'][number]['reading'], StateName>>
 function Dimensions({ study }: { readonly study: Study }): JSX.Element {
   const units = useUnits()
   const range = (span: { readonly low: number; readonly high: number } | null): string =>
-    span === null ? '–' : `${lengthIn(span.low, units).replace(/ (mm|in)$/, '')}…${lengthIn(span.high, units)}`
+    span === null ? '–' : `${bareIn(span.low, units)}…${lengthIn(span.high, units)}`
   const rows = study.dimensions.filter(({ n }) => n > 0)
   if (rows.length === 0) return <Empty title={buildWords.studyEmpty} />
   return (

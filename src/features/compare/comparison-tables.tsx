@@ -1,6 +1,6 @@
 import type { JSX } from 'react'
 import type { Comparison, VerdictChange } from '../../../shared/compare/comparison.ts'
-import { bandIn, lengthIn, signedIn, useUnits } from '../../lib/units.ts'
+import { bandIn, bareIn, lengthIn, signedIn, useUnits } from '../../lib/units.ts'
 import { DataTable } from '../../ui/data-table.tsx'
 import { StateMark, type StateName } from '../../ui/state-mark.tsx'
 import { compareWords } from '../../words/compare-words.ts'
@@ -79,8 +79,7 @@ export function Margins({ comparison }: { readonly comparison: Comparison }): JS
               isFigure: true,
               cell: (row) => (
                 <>
-                  {lengthIn(row.clearance.before, units).replace(/ (mm|in)$/, '')} →{' '}
-                  {lengthIn(row.clearance.after, units)}
+                  {bareIn(row.clearance.before, units)} → {lengthIn(row.clearance.after, units)}
                 </>
               ),
             },

@@ -1,11 +1,18 @@
 import { useId, type JSX } from 'react'
 import type { RulerUnit } from '../../../shared/units/units.ts'
-import { lengthIn } from '../../lib/units.ts'
+import { bareIn, lengthIn } from '../../lib/units.ts'
 import { nestWords } from '../../words/nest-words.ts'
 import type { NestGap, NestPicture, NestPoint, NestShape } from './nest-picture.ts'
 
-const wide = 460
-const margin = 14
+const wide = 560
+const margin = 10
+/** Room at the right for the figures of level gaps. */
+const gutter = 78
+const lineHeight = 25
+const tallest = 420
+
+const levelGaps = ({ gaps }: NestPicture): number =>
+  gaps.filter(({ from, to }) => Math.abs(to.x - from.x) >= Math.abs(to.y - from.y)).length
 
 interface Frame {
   readonly x: (value: number) => number
@@ -13,12 +20,16 @@ interface Frame {
   readonly height: number
 }
 
-function frameOf({ bounds }: NestPicture): Frame {
-  const scale = (wide - 2 * margin) / (bounds.right - bounds.left)
+function frameOf(picture: NestPicture): Frame {
+  const { bounds } = picture
+  const scale = Math.min(
+    (wide - gutter - margin) / (bounds.right - bounds.left),
+    tallest / (bounds.top - bounds.bottom),
+  )
   return {
     x: (value) => margin + (value - bounds.left) * scale,
     y: (value) => margin + (bounds.top - value) * scale,
-    height: (bounds.top - bounds.bottom) * scale + 2 * margin,
+    height: Math.max((bounds.top - bounds.bottom) * scale + 2 * margin, levelGaps(picture) * lineHeight + 8),
   }
 }
 
@@ -45,28 +56,54 @@ function Shape({
   )
 }
 
+interface Label {
+  readonly left: number
+  readonly top: number
+  readonly width: number
+  readonly text: string
+}
+
+const isUpright = (gap: NestGap): boolean => Math.abs(gap.to.y - gap.from.y) > Math.abs(gap.to.x - gap.from.x)
+
+/** Figures of level gaps stand below one another at the right, those of upright gaps beside them. */
+function labelsOf(picture: NestPicture, frame: Frame, units: RulerUnit): ReadonlyMap<NestGap, Label> {
+  const labels = new Map<NestGap, Label>()
+  let next = 2
+  const level = picture.gaps.filter((gap) => !isUpright(gap)).toSorted((a, b) => b.from.y - a.from.y)
+  for (const gap of picture.gaps) {
+    if (!isUpright(gap)) continue
+    const text = bareIn(gap.clearance, units)
+    const middle = (frame.y(gap.from.y) + frame.y(gap.to.y)) / 2
+    labels.set(gap, { left: frame.x(gap.from.x) + 7, top: middle - 10, width: text.length * 8.4 + 10, text })
+  }
+  for (const gap of level) {
+    const text = bareIn(gap.clearance, units)
+    const top = Math.max(next, frame.y(gap.from.y) - 10)
+    next = top + lineHeight
+    labels.set(gap, { left: wide - gutter + 16, top, width: text.length * 8.4 + 10, text })
+  }
+  return labels
+}
+
 /** A gap's dimension line and figure, which is also a way to its fit. */
 function Gap({
   gap,
+  label,
   frame,
   units,
   isShown,
   onPoint,
 }: {
   readonly gap: NestGap
+  readonly label: Label
   readonly frame: Frame
   readonly units: RulerUnit
   readonly isShown: boolean
   readonly onPoint: (fit: string | null) => void
 }): JSX.Element {
   const [x1, y1, x2, y2] = [frame.x(gap.from.x), frame.y(gap.from.y), frame.x(gap.to.x), frame.y(gap.to.y)]
-  const text = lengthIn(gap.clearance, units).replace(/ (mm|in)$/, '')
-  const isUpright = Math.abs(y2 - y1) > Math.abs(x2 - x1)
-  const width = text.length * 7.4 + 8
-  // Beside an upright gap, above a level one, always inside the picture.
-  const left = isUpright ? Math.max(x1, x2) + 6 : Math.min(Math.max((x1 + x2) / 2 - width - 8, 2), wide - width - 2)
-  const top = isUpright ? (y1 + y2) / 2 - 9 : (y1 + y2) / 2 - 9
   const colour = gap.verdict === 'fail' ? 'var(--fail)' : gap.verdict === 'warn' ? 'var(--warn)' : 'var(--link)'
+  const middle = label.top + 11
   return (
     <a
       href={`#fit-${gap.fit}`}
@@ -76,29 +113,44 @@ function Gap({
       onBlur={() => onPoint(null)}
       aria-label={nestWords.gap(gap.fit, gap.axis, lengthIn(gap.clearance, units), gap.verdict)}
     >
-      <rect x={left - 3} y={top - 4} width={width + 6} height={26} fill="transparent" />
+      <rect x={label.left - 4} y={label.top - 2} width={label.width + 8} height={26} fill="transparent" />
+      {isUpright(gap) ? null : (
+        <path
+          d={`M${String(Math.max(x1, x2))} ${String(y1)}L${String(label.left - 8)} ${String(middle)}H${String(label.left)}`}
+          fill="none"
+          stroke={colour}
+          strokeWidth="1"
+        />
+      )}
       <path
         d={`M${String(x1)} ${String(y1)}L${String(x2)} ${String(y2)}`}
         stroke={colour}
-        strokeWidth={isShown ? 3.2 : 1.8}
+        strokeWidth={isShown ? 3.6 : 2}
       />
       {[
         [x1, y1],
         [x2, y2],
       ].map(([x, y], index) => (
-        <circle key={index} cx={x} cy={y} r={isShown ? 3 : 2} fill={colour} />
+        <circle key={index} cx={x} cy={y} r={isShown ? 3.2 : 2.2} fill={colour} />
       ))}
       <rect
-        x={left}
-        y={top}
-        width={width}
-        height={18}
+        x={label.left}
+        y={label.top}
+        width={label.width}
+        height={22}
         fill="var(--sheet)"
         stroke={colour}
-        strokeWidth={isShown ? 2.2 : 1}
+        strokeWidth={isShown ? 2.4 : 1.2}
       />
-      <text x={left + width / 2} y={top + 13.2} textAnchor="middle" fontSize="12" fill="var(--ink)" className="figure">
-        {text}
+      <text
+        x={label.left + label.width / 2}
+        y={middle + 5}
+        textAnchor="middle"
+        fontSize="14"
+        fill="var(--ink)"
+        className="figure"
+      >
+        {label.text}
       </text>
     </a>
   )
@@ -118,6 +170,7 @@ export function NestView({
 }): JSX.Element {
   const hatch = useId().replaceAll(/[^a-zA-Z0-9]/g, '')
   const frame = frameOf(picture)
+  const labels = labelsOf(picture, frame, units)
   const title = nestWords.title(picture.kind, picture.along, picture.id)
   return (
     <figure className="min-w-0">
@@ -150,7 +203,7 @@ export function NestView({
             x={frame.x(at.x)}
             y={frame.y(at.y) + 4}
             textAnchor="middle"
-            fontSize="12"
+            fontSize="13"
             fill="var(--ink)"
             stroke="var(--sheet)"
             strokeWidth="4"
@@ -159,16 +212,20 @@ export function NestView({
             {text.length > 34 ? `${text.slice(0, 33)}…` : text}
           </text>
         ))}
-        {picture.gaps.map((gap) => (
-          <Gap
-            key={`${gap.fit} ${gap.axis}`}
-            gap={gap}
-            frame={frame}
-            units={units}
-            isShown={shown === gap.fit}
-            onPoint={onPoint}
-          />
-        ))}
+        {picture.gaps.map((gap) => {
+          const label = labels.get(gap)
+          return label === undefined ? null : (
+            <Gap
+              key={`${gap.fit} ${gap.axis}`}
+              gap={gap}
+              label={label}
+              frame={frame}
+              units={units}
+              isShown={shown === gap.fit}
+              onPoint={onPoint}
+            />
+          )
+        })}
       </svg>
       <figcaption className="label mt-1">
         {title}. {nestWords.factor(picture.kind, picture.factor)}

@@ -22,7 +22,7 @@ export function Nest({
   if (pictures.length === 0) return <Empty title={nestWords.none} />
   return (
     <>
-      <div className="grid items-end gap-6 sm:grid-cols-2 xl:grid-cols-3">
+      <div className="grid items-end gap-x-8 gap-y-6 md:grid-cols-2">
         {pictures.map((picture) => (
           <NestView key={picture.id} picture={picture} units={units} shown={shown} onPoint={onPoint} />
         ))}

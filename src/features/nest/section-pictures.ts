@@ -187,11 +187,11 @@ function addWrap(report: Report, fit: FitReport, along: Along, factor: number, s
     )
   growing.names.push({
     text: fit.put,
-    at: { x: isAcross ? -growing.half * 0.6 : 0, y: bottom - thick - growing.half * 0.06 },
+    at: { x: growing.half * 0.35, y: bottom - thick - growing.half * 0.07 },
   })
   if (isAcross) growing.half = inner + thick
   growing.top = top + thick
-  growing.bottom = bottom - thick - growing.half * 0.1
+  growing.bottom = bottom - thick
 }
 
 function sectionOf(report: Report, assembly: Assembly, along: Along): NestPicture {
@@ -209,8 +209,7 @@ function sectionOf(report: Report, assembly: Assembly, along: Along): NestPictur
   addContents(report, assembly, along, factor, growing)
   bothSides(growing, assembly.base, 1, [inside, inside + wall], [-floor, depth])
   growing.shapes.push({ piece: assembly.base, look: 'wall', slant: 1, outline: rectangle(-inside, -floor, inside, 0) })
-  growing.names.push({ text: assembly.base, at: { x: 0, y: -floor - inside * 0.09 } })
-  growing.bottom = -floor - inside * 0.15
+  growing.names.push({ text: assembly.base, at: { x: -inside * 0.5, y: -floor - inside * 0.08 } })
   growing.top = Math.max(growing.top, depth)
   let slant: 1 | -1 = -1
   for (const fit of assembly.covers) {
@@ -230,7 +229,7 @@ function sectionOf(report: Report, assembly: Assembly, along: Along): NestPictur
     bounds: {
       left: -growing.half,
       right: growing.half,
-      bottom: growing.bottom,
+      bottom: growing.bottom - inside * 0.16,
       top: growing.top + inside * 0.16,
     },
   }

@@ -1,5 +1,5 @@
 import type { JSX } from 'react'
-import { lengthIn } from '../../lib/units.ts'
+import { bareIn } from '../../lib/units.ts'
 import { trendWords } from '../../words/trend-words.ts'
 import type { TrendPoint } from './trend-queries.ts'
 
@@ -58,7 +58,7 @@ export function TrendChart({
         <g key={value}>
           <path d={`M${String(edge.left)} ${String(y(value))}H${String(wide - edge.right)}`} stroke="var(--hair)" />
           <text x={edge.left - 6} y={y(value) + 4} textAnchor="end" fontSize="12" fill="var(--soft)" className="figure">
-            {lengthIn(value, units).replace(/ (mm|in)$/, '')}
+            {bareIn(value, units)}
           </text>
         </g>
       ))}

@@ -112,7 +112,7 @@ export function TextEditor({
           syntaxHighlighting(colours),
           look,
           EditorView.lineWrapping,
-          EditorView.contentAttributes.of({ 'aria-label': label }),
+          EditorView.contentAttributes.of({ 'aria-label': label, tabindex: '0' }),
           EditorView.updateListener.of((update) => {
             if (update.docChanged) changed.current(update.state.doc.toString())
           }),

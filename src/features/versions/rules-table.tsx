@@ -27,8 +27,9 @@ export function RulesTable({
   const units = useUnits()
   const { value, choose } = useAddressFilter()
   const wanted = order.find((status) => status === value('verdicts'))
+  const isAll = value('verdicts') === 'all'
   const rows = verdicts
-    .filter(({ status }) => wanted === undefined || status === wanted)
+    .filter(({ status }) => isAll || (wanted === undefined ? status !== 'pass' : status === wanted))
     .toSorted((a, b) => order.indexOf(a.status) - order.indexOf(b.status))
   const save = (): void =>
     saveText(
@@ -54,10 +55,13 @@ export function RulesTable({
           {versionWords.rulesShow}
           <select
             className="field w-auto"
-            value={wanted ?? ''}
+            value={isAll ? 'all' : (wanted ?? '')}
             onChange={({ target }) => choose({ verdicts: target.value })}
           >
             <option value="">
+              {versionWords.rulesNotable} ({verdicts.filter(({ status }) => status !== 'pass').length})
+            </option>
+            <option value="all">
               {versionWords.rulesAll} ({verdicts.length})
             </option>
             {order.map((status) => {
@@ -75,7 +79,7 @@ export function RulesTable({
         </button>
       </div>
       {rows.length === 0 ? (
-        <Empty title={versionWords.noRules} />
+        <Empty title={isAll || wanted !== undefined ? versionWords.noRules : versionWords.allPass} />
       ) : (
         <DataTable
           caption={versionWords.rules}

@@ -4,7 +4,7 @@ import { Link } from 'react-router-dom'
 import { paths } from '../../app/paths.ts'
 import { holdsQuery, type Hold, type Thing } from '../../features/sets/set-queries.ts'
 import { csvText, saveText } from '../../lib/save-text.ts'
-import { lengthIn, readLength, useUnits } from '../../lib/units.ts'
+import { bareIn, readLength, useUnits } from '../../lib/units.ts'
 import { useAddressFilter } from '../../lib/use-address-filter.ts'
 import { usePart } from '../../lib/use-part.ts'
 import { useTitle } from '../../lib/use-title.ts'
@@ -23,7 +23,7 @@ function SizeForm(): JSX.Element {
   const { value, choose } = useAddressFilter()
   const written = (name: string): string => {
     const mm = Number(value(name))
-    return value(name) === '' || !Number.isFinite(mm) ? '' : lengthIn(mm, units).replace(/ (mm|in)$/, '')
+    return value(name) === '' || !Number.isFinite(mm) ? '' : bareIn(mm, units)
   }
   const [typed, setTyped] = useState(() => ({
     length: written('length'),
@@ -80,7 +80,7 @@ function Found({ team, items }: { readonly team: string; readonly items: readonl
   const triple = (size: { readonly length: number; readonly width: number; readonly depth: number | null }): string =>
     [size.length, size.width, size.depth]
       .filter((part) => part !== null)
-      .map((part) => lengthIn(part, units).replace(/ (mm|in)$/, ''))
+      .map((part) => bareIn(part, units))
       .join(' × ')
   const save = (): void =>
     saveText(

@@ -1,18 +1,17 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query'
 import { useMemo, useState, type JSX } from 'react'
-import { DropZone, FileTrigger, type FileDropItem } from 'react-aria-components'
 import { Link } from 'react-router-dom'
 import { limits } from '../../../shared/api/limits.ts'
 import { paths } from '../../app/paths.ts'
 import { judgeText } from '../../features/engine/judge-text.ts'
 import { pushSets, type Pushed } from '../../features/engine/push-sets.ts'
+import { FileChoice } from '../../features/upload/file-choice.tsx'
 import { findSets, type Found } from '../../features/upload/found-files.ts'
 import { today } from '../../lib/dates.ts'
 import { usePart } from '../../lib/use-part.ts'
 import { useTitle } from '../../lib/use-title.ts'
 import { DataTable } from '../../ui/data-table.tsx'
 import { Field } from '../../ui/field.tsx'
-import { PressButton } from '../../ui/press-button.tsx'
 import { RefusalNote } from '../../ui/refusal-note.tsx'
 import { Sheet } from '../../ui/sheet.tsx'
 import { StateMark } from '../../ui/state-mark.tsx'
@@ -135,30 +134,11 @@ export default function UploadPage(): JSX.Element {
   const [found, setFound] = useState<{ readonly id: number; readonly found: Found } | null>(null)
   const take = (files: readonly File[]): void =>
     void findSets(files).then((next) => setFound((before) => ({ id: (before?.id ?? 0) + 1, found: next })))
-  const chosen = (list: FileList | null): void => take([...(list ?? [])])
   return (
     <>
       <TitleBlock title={setsWords.uploadTitle} above={<Link to={paths.sets(team)}>{setsWords.title}</Link>} />
       <div className="space-y-5">
-        <DropZone
-          className="border-2 border-dashed border-stroke p-6 text-center data-drop-target:border-ink data-drop-target:bg-shade"
-          onDrop={({ items }) =>
-            void Promise.all(
-              items.filter((item): item is FileDropItem => item.kind === 'file').map((item) => item.getFile()),
-            ).then(take)
-          }
-        >
-          <p className="font-semibold">{setsWords.drop}</p>
-          <p className="mx-auto mb-4 max-w-prose text-sm text-soft">{setsWords.uploadExplain}</p>
-          <div className="flex flex-wrap justify-center gap-3">
-            <FileTrigger acceptDirectory onSelect={chosen}>
-              <PressButton>{setsWords.chooseFolder}</PressButton>
-            </FileTrigger>
-            <FileTrigger allowsMultiple acceptedFileTypes={['.yaml', '.yml']} onSelect={chosen}>
-              <PressButton>{setsWords.chooseFiles}</PressButton>
-            </FileTrigger>
-          </div>
-        </DropZone>
+        <FileChoice onChoose={take} />
         {found === null ? null : <FoundSets key={found.id} team={team} found={found.found} />}
       </div>
     </>

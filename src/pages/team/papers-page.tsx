@@ -9,7 +9,7 @@ import { useTeamAction } from '../../features/team/use-team-action.ts'
 import { call } from '../../lib/api.ts'
 import { momentText } from '../../lib/dates.ts'
 import { csvText, saveText } from '../../lib/save-text.ts'
-import { lengthIn, readLength, useUnits } from '../../lib/units.ts'
+import { bareIn, lengthIn, readLength, useUnits } from '../../lib/units.ts'
 import { useAddressFilter } from '../../lib/use-address-filter.ts'
 import { usePart } from '../../lib/use-part.ts'
 import { DataTable } from '../../ui/data-table.tsx'
@@ -195,7 +195,7 @@ function Papers({ team, canEdit }: { readonly team: string; readonly canEdit: bo
             name: teamWords.readings,
             isFigure: true,
             isExtra: true,
-            cell: (row) => row.readings.map((reading) => lengthIn(reading, units).replace(/ (mm|in)$/, '')).join('  '),
+            cell: (row) => row.readings.map((reading) => bareIn(reading, units)).join('  '),
           },
           { name: teamWords.note, isExtra: true, cell: (row) => row.note },
           { name: teamWords.at, isExtra: true, cell: (row) => `${momentText(row.at)}, ${row.by}` },
