@@ -1,7 +1,6 @@
 import type { Request } from 'express'
 import type { AnswerOf, BodyOf, Endpoint, ParamsOf, QueryOf } from '../../shared/api/endpoint.ts'
 import type { Context } from '../context.ts'
-import type { FileAnswer } from './answers.ts'
 import type { Caller, PersonCaller, RobotCaller } from './caller.ts'
 import type { TeamAccess } from './team-access.ts'
 
@@ -28,9 +27,7 @@ export interface CallerAsked<E extends Endpoint> extends Asked<E> {
 }
 
 /** Endpoints without a JSON answer give nothing or a file. */
-export type Answered<E extends Endpoint> = [AnswerOf<E>] extends [undefined]
-  ? Promise<FileAnswer | void>
-  : Promise<AnswerOf<E>>
+export type Answered<E extends Endpoint> = Promise<[AnswerOf<E>] extends [undefined] ? unknown : AnswerOf<E>>
 
 type Need = 'team' | 'person' | 'caller' | 'open'
 

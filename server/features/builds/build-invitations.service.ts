@@ -8,7 +8,7 @@ import type { TemplateSet } from '../sets/template-set.entity.ts'
 import { recordAudit } from '../upkeep/record-audit.ts'
 import { Version } from '../versions/version.entity.ts'
 import { BuildInvitation } from './build-invitation.entity.ts'
-import { Build } from './build.entity.ts'
+import type { Build } from './build.entity.ts'
 
 type Invite = AnswerOf<(typeof buildEndpoints)['inviteTester']>
 

@@ -8,7 +8,11 @@ export interface BagGiven extends PieceBase {
   /** Face width, gusset depth, height: of the open bag, inside. */
   readonly inside: { readonly width: Millimetres; readonly depth: Millimetres; readonly height: Millimetres } | Open
   /** Blank given by hand: its length round the bag, its height, and the vertical scores from one end. */
-  readonly blank: { readonly length: Millimetres; readonly height: Millimetres; readonly scores: readonly Millimetres[] } | null
+  readonly blank: {
+    readonly length: Millimetres
+    readonly height: Millimetres
+    readonly scores: readonly Millimetres[]
+  } | null
   /** Turned-in strip at the top, folded-under strip at the bottom, and the glued seam; `null` takes the default. */
   readonly top: Millimetres | null
   readonly bottom: Millimetres | null

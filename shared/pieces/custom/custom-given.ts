@@ -20,6 +20,14 @@ export interface CustomGiven extends PieceBase {
   readonly stock: string
   readonly outline: readonly CustomPoint[]
   readonly scores: readonly CustomScore[]
-  readonly inside: { readonly length: Millimetres; readonly width: Millimetres; readonly depth: Millimetres | null } | null
-  readonly outside: { readonly length: Millimetres; readonly width: Millimetres; readonly height: Millimetres | null } | null
+  readonly inside: {
+    readonly length: Millimetres
+    readonly width: Millimetres
+    readonly depth: Millimetres | null
+  } | null
+  readonly outside: {
+    readonly length: Millimetres
+    readonly width: Millimetres
+    readonly height: Millimetres | null
+  } | null
 }

@@ -21,7 +21,12 @@ export interface BaronialByCorners extends EnvelopeBase {
   readonly style: 'baronial'
   readonly by: 'corners'
   readonly square: Millimetres
-  readonly corners: { readonly left: Millimetres; readonly right: Millimetres; readonly bottom: Millimetres; readonly flap: Millimetres }
+  readonly corners: {
+    readonly left: Millimetres
+    readonly right: Millimetres
+    readonly bottom: Millimetres
+    readonly flap: Millimetres
+  }
 }
 
 /** A square-flap envelope; `null` takes the model's default. */

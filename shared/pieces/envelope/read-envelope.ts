@@ -24,7 +24,8 @@ function readSeam(
   written: EnvelopeWritten['seam'],
   read: ValueReader,
 ): { readonly bottom: Millimetres; readonly top: Millimetres } {
-  if (written === undefined) return { bottom: languageDefaults.baronialSeam.value, top: languageDefaults.baronialSeam.value }
+  if (written === undefined)
+    return { bottom: languageDefaults.baronialSeam.value, top: languageDefaults.baronialSeam.value }
   if (typeof written !== 'string') {
     return { bottom: read.length(['seam', 'bottom'], written.bottom), top: read.length(['seam', 'top'], written.top) }
   }

@@ -13,5 +13,6 @@ export interface SleeveGiven extends PieceBase {
   /** Which girth it goes round. */
   readonly girth: 'width' | 'length'
   /** Blank given by hand: its length round the girth, its width along the tube, and the four scores from one end. */
-  readonly blank: { readonly length: Millimetres; readonly width: Millimetres; readonly scores: readonly Millimetres[] } | Open | null
+  readonly blank:
+    { readonly length: Millimetres; readonly width: Millimetres; readonly scores: readonly Millimetres[] } | Open | null
 }

@@ -14,7 +14,6 @@ import { drainJobs } from '../../../server/jobs/run-worker.ts'
 import { createLog } from '../../../server/log.ts'
 import { createMailer } from '../../../server/mail/mailer.ts'
 import { createObjectStore } from '../../../server/storage/object-store.ts'
-import { createTestDatabase } from './test-database.ts'
 
 export interface TestServer {
   readonly url: string
@@ -38,9 +37,16 @@ const listen = (server: Server): Promise<number> =>
     })
   })
 
+/** A test file's own database; loaded only inside of tests, for benches bring theirs. */
+const ownDatabase = async (): Promise<{ readonly url: string; drop(): Promise<void> }> =>
+  (await import('./test-database.ts')).createTestDatabase()
+
 /** A whole server with its own database, mail and files, reached over HTTP. */
-export async function startTestServer(environment: Readonly<Record<string, string>> = {}): Promise<TestServer> {
-  const [made, mail] = await Promise.all([createTestDatabase(), startMailFake()])
+export async function startTestServer(
+  environment: Readonly<Record<string, string>> = {},
+  given: { readonly url: string; drop(): Promise<void> } | null = null,
+): Promise<TestServer> {
+  const [made, mail] = await Promise.all([given ?? ownDatabase(), startMailFake()])
   const folder = mkdtempSync(join(tmpdir(), 'foldgauge-objects-'))
   const store = await startObjectStoreFake(folder)
   const web = createServer()
