@@ -16,22 +16,29 @@ const isStale = (built, sources) => {
   return Math.max(...sources.map((source) => newest(join(root, source)))) > statSync(target).mtimeMs
 }
 
+function build({ title, made, from, words = [] }) {
+  if (!isStale(made, [...from, 'shared', 'vite.config.ts', 'package-lock.json'])) return
+  runStep(title, process.execPath, ['node_modules/vite/bin/vite.js', 'build', '--logLevel', 'warn', ...words])
+}
+
 export function buildCommandLine() {
-  if (
-    !isStale('dist/cli/foldgauge.js', [
-      'cli',
-      'shared',
-      'server/dev/keep-compiled.ts',
-      'vite.config.ts',
-      'package-lock.json',
-    ])
-  )
-    return
-  runStep('Building the command line', process.execPath, [
-    'node_modules/vite/bin/vite.js',
-    'build',
-    '--ssr',
-    '--logLevel',
-    'warn',
-  ])
+  build({
+    title: 'Building the command line',
+    made: 'dist/cli/foldgauge.js',
+    from: ['cli', 'server/dev/keep-compiled.ts'],
+    words: ['--ssr'],
+  })
+}
+
+export function buildServer() {
+  build({
+    title: 'Building the server',
+    made: 'dist/server/main.js',
+    from: ['server'],
+    words: ['--ssr', '--mode', 'server'],
+  })
+}
+
+export function buildPage() {
+  build({ title: 'Building the page', made: 'dist/page/index.html', from: ['src', 'public', 'index.html'] })
 }
